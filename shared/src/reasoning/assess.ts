@@ -1,0 +1,29 @@
+import type { Assessment, StandingOnly } from './assessment.js';
+import { assessPlainly, judgePlainly } from './oracle/assess-plainly.js';
+import type { Panel } from './panel.js';
+import { readPanel } from './validation/read-panel.js';
+
+export type * from './assessment.js';
+export type * from './panel.js';
+export { type Fault, PanelRefused } from './validation/panel-refused.js';
+
+/**
+ * What a panel's judgements come to: the pooled standing of every candidate and
+ * of *none of these*, and what it depends on. Pure: no clock, no randomness, no
+ * input or output. It supports a panel's discussion and is not a diagnosis.
+ *
+ * Input and answer are described in `panel.ts` and `assessment.ts`; all shares
+ * are fractions. With `only: 'standing'` just the standing is computed.
+ *
+ * @throws PanelRefused, its `errors` naming every fault with its path
+ * @example assess({ candidates: ['a'], contributors: [{ id: 'c', prior: [0.25, 0.75] }] }).standing // [0.25, 0.75]
+ */
+export function assess(panel: unknown, options: { only: 'standing' }): StandingOnly;
+export function assess(panel: Panel): Assessment;
+export function assess(panel: unknown): Assessment;
+export function assess(panel: unknown, options: { only?: 'standing' } = {}): Assessment | StandingOnly {
+  const checked = readPanel(panel);
+  if (options.only === 'standing')
+    return { method: 'weighhouse/1', standing: judgePlainly(checked).standing };
+  return assessPlainly(checked);
+}
