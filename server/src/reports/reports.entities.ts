@@ -1,0 +1,2 @@
+/** The tables of this domain. */
+export const reportsEntities: (new () => object)[] = [];

@@ -1,0 +1,2 @@
+/** The tables of this domain. */
+export const summariesEntities: (new () => object)[] = [];
