@@ -1,0 +1,35 @@
+import { useSyncExternalStore } from 'react';
+
+export type ThemeChoice = 'system' | 'light' | 'dark';
+
+const key = 'weighhouse.theme';
+const dark = matchMedia('(prefers-color-scheme: dark)');
+const listeners = new Set<() => void>();
+
+function choice(): ThemeChoice {
+  const stored = localStorage.getItem(key);
+  return stored === 'light' || stored === 'dark' ? stored : 'system';
+}
+
+function appearance(): 'light' | 'dark' {
+  const chosen = choice();
+  if (chosen !== 'system') return chosen;
+  return dark.matches ? 'dark' : 'light';
+}
+
+function subscribe(listener: () => void): () => void {
+  listeners.add(listener);
+  dark.addEventListener('change', listener);
+  return () => {
+    listeners.delete(listener);
+    dark.removeEventListener('change', listener);
+  };
+}
+
+export function chooseTheme(chosen: ThemeChoice): void {
+  localStorage.setItem(key, chosen);
+  for (const listener of listeners) listener();
+}
+
+export const useThemeChoice = () => useSyncExternalStore(subscribe, choice);
+export const useAppearance = () => useSyncExternalStore(subscribe, appearance);

@@ -1,0 +1,22 @@
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { meSchema, type SignIn } from '@weighhouse/shared/contracts/people';
+import { request } from '../../../lib/api';
+import { decideSession } from '../../../lib/session';
+import { meQuery } from './get-me';
+
+const signIn = (body: SignIn) => request('POST', '/api/session', { schema: meSchema, body, wait: false });
+
+/** Signs in. What somebody else's session left in the cache goes; requests that waited for this person go on. */
+export function useSignIn() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: signIn,
+    onSuccess: (me) => {
+      const before = client.getQueryData(meQuery.queryKey);
+      const same = before?.id === me.id;
+      if (!same) client.clear();
+      client.setQueryData(meQuery.queryKey, me);
+      decideSession(same);
+    },
+  });
+}
