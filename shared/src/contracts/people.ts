@@ -111,7 +111,7 @@ export const personParamsSchema = z.object({ personId: idSchema });
 export const invitationSchema = z
   .object({ name: z.string(), email: z.string(), expiresAt: momentSchema })
   .meta({ id: 'Invitation' });
-export const invitationParamsSchema = z.object({ token: z.string().min(20).max(200) });
+export const invitationParamsSchema = z.object({ token: z.string().min(1).max(200) });
 export const acceptInvitationSchema = z
   .object({ password: newPasswordSchema })
   .meta({ id: 'AcceptInvitation' });

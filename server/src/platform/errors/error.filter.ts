@@ -1,7 +1,7 @@
 import { type ArgumentsHost, Catch, type ExceptionFilter, HttpException, Logger } from '@nestjs/common';
 import { type ErrorBody, type ErrorId } from '@weighhouse/shared/contracts/errors';
 import type { Response } from 'express';
-import { Refusal } from './refusal.js';
+import { Refusal, TooMany } from './refusal.js';
 
 const byStatus: Record<number, { id: ErrorId; message: string }> = {
   400: { id: 'malformed', message: 'The request could not be read.' },
@@ -26,6 +26,7 @@ export class ErrorFilter implements ExceptionFilter {
       response.destroy();
       return;
     }
+    if (error instanceof TooMany) response.setHeader('Retry-After', String(error.retryAfterSeconds));
     response.status(status).json(body);
   }
 

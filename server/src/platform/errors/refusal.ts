@@ -32,6 +32,13 @@ export const sealedRefusal = (): Refusal =>
 export const stale = (current: unknown): Refusal =>
   new Refusal('stale', 'Somebody changed this meanwhile. Compare both texts and save again.', { current });
 
+/** Too many attempts; `retryAfterSeconds` leaves as the header Retry-After. */
+export class TooMany extends Refusal {
+  constructor(readonly retryAfterSeconds: number) {
+    super('too-many', 'Too many attempts. Wait a minute and try again.');
+  }
+}
+
 /** Something is still missing for a move, named part by part. */
 export const notReady = (fields: FieldFault[]): Refusal =>
   new Refusal('not-ready', 'Something is still missing before this can be done.', { fields });

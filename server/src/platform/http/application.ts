@@ -9,6 +9,7 @@ import helmet from 'helmet';
 import { pinoHttp } from 'pino-http';
 import { type Configuration, CONFIGURATION } from '../config/configuration.js';
 import { setUpOpenApi } from './open-api.js';
+import { refuseForeignRequests } from './foreign-requests.js';
 import { validationPipe } from './validation.js';
 
 /** Everything between the network and the controllers, the same for the server and for tests. */
@@ -18,6 +19,7 @@ export function configureApplication(app: NestExpressApplication): void {
   app.use(helmet(securityHeaders(configuration)));
   app.use(requestLog(configuration));
   app.use(cookieParser());
+  app.use('/api', refuseForeignRequests(configuration.PUBLIC_URL));
   app.use('/api', (_: Request, response: Response, next: NextFunction) => {
     response.setHeader('Cache-Control', 'no-store');
     next();
