@@ -1,0 +1,16 @@
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { type JudgePrior, savedJudgementSchema } from '@weighhouse/shared/contracts/judgements';
+import { put } from '../../../lib/api';
+import { refreshDifferential, takeOwnVersion } from './refresh-differential';
+
+/** Saves one's own prior as a new version. */
+export function useSavePrior(caseId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (body: JudgePrior) => put(`/api/cases/${caseId}/judgement/prior`, savedJudgementSchema, body),
+    onSuccess: ({ version }) => {
+      takeOwnVersion(client, caseId, version);
+      return refreshDifferential(client, caseId);
+    },
+  });
+}

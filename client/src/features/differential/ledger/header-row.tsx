@@ -1,0 +1,22 @@
+import { useLedger } from './ledger-context';
+
+/** The candidates as columns. */
+export function HeaderRow() {
+  const { columns } = useLedger();
+  return (
+    <tr>
+      <th scope="col" className="ledger-assumption">
+        Assumption: <b>one cause</b>
+      </th>
+      {columns.map((column) => (
+        <th key={column.id} scope="col" className="ledger-candidate" title={column.name}>
+          <span className="ledger-letter">
+            {column.letter}
+            {column.mustNotMiss && <span className="ledger-must"> must not miss</span>}
+          </span>
+          <span className="ledger-candidate-name">{column.short}</span>
+        </th>
+      ))}
+    </tr>
+  );
+}

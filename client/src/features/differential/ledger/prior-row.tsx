@@ -1,0 +1,49 @@
+import { ShareBar } from '../../../components/marks/share-bar';
+import type { Column } from '../model/columns';
+import { priorSentence, priorView } from '../model/prior-view';
+import { useLedger } from './ledger-context';
+import { MovingFigure } from './moving-figure';
+
+/** The first row: what the panel starts from. */
+export function PriorRow() {
+  const { columns, panel, unsaved, differential } = useLedger();
+  const selected = panel?.kind === 'prior' || (panel?.kind === 'why' && panel.target === 'prior');
+  return (
+    <tr className="ledger-row ledger-row--prior" aria-selected={selected}>
+      <th scope="row" className="ledger-title" data-row={0} data-column={0} tabIndex={-1}>
+        <span className="ledger-name">Before any finding</span>
+        <span className="ledger-line">
+          {priorLine(differential)}
+          {unsaved.has('prior') && <b className="ledger-unsaved">Typed, not saved</b>}
+        </span>
+      </th>
+      {columns.map((column) => (
+        <PriorCell key={column.id} column={column} />
+      ))}
+    </tr>
+  );
+}
+
+function priorLine({ assessment, sealed }: ReturnType<typeof useLedger>['differential']): string {
+  if (assessment) return assessment.priorGiven ? 'Starting shares, pooled' : 'Nobody gave a prior: all start alike';
+  return sealed ? 'Starting shares, yours' : 'Starting shares';
+}
+
+function PriorCell({ column }: { column: Column }) {
+  const { differential } = useLedger();
+  const view = priorView(differential, column.index);
+  return (
+    <td className="ledger-cell" data-row={0} data-column={column.index + 1} tabIndex={-1}>
+      <span className="aside-text">{priorSentence(view)}</span>
+      <span className="ledger-figure" aria-hidden="true">
+        {view.ownShare && <span className="mark-diamond mark-diamond--inline" />}
+        <span className="figures">{view.share !== null && <MovingFigure share={view.share} />}</span>
+      </span>
+      {view.sealed ? (
+        <span className="ledger-sealed" aria-hidden="true" />
+      ) : (
+        <ShareBar share={view.ownShare ? null : view.share} ticks={view.ticks} own={view.own} none={column.none} />
+      )}
+    </td>
+  );
+}
