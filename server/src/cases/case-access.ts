@@ -30,7 +30,7 @@ export class CaseAccess {
     const opened = await this.find(actor, caseId, em);
     if (!opened) throw notFound();
     const verdict = can(actor, action, opened.subject);
-    if (verdict !== 'yes') throw refusalFor(verdict, opened.file);
+    if (verdict !== 'yes') throw refusalFor(verdict, opened.file, action);
     return opened;
   }
 
@@ -57,7 +57,7 @@ export function describe(actor: Pick<Actor, 'roles'>, file: CaseFile, parts: Par
   return { file, parts, subject, abilities: abilitiesOf(actor, subject) };
 }
 
-function refusalFor(verdict: Exclude<Verdict, 'yes'>, file: CaseFile): Refusal {
+function refusalFor(verdict: Exclude<Verdict, 'yes'>, file: CaseFile, action: CaseAction): Refusal {
   switch (verdict) {
     case 'stranger':
       return notFound();
@@ -66,11 +66,15 @@ function refusalFor(verdict: Exclude<Verdict, 'yes'>, file: CaseFile): Refusal {
     case 'wrongState':
       return new Refusal('wrong-state', `The case is ${stateWords[file.state]}; this cannot be done now.`);
     case 'roundOpen':
+      if (action.startsWith('candidate.')) return setFrozen();
       return new Refusal('round-open', 'A round is open. Unseal or close it first.');
     case 'roundNotOpen':
       return new Refusal('round-not-open', 'No round is open. The chair opens one.');
   }
 }
+
+const setFrozen = (): Refusal =>
+  new Refusal('set-frozen', 'A sealed round is open: the candidates stay as they are until it is unsealed.');
 
 const stateWords: Record<CaseFile['state'], string> = {
   draft: 'still a draft',

@@ -1,7 +1,7 @@
 import type { CaseState, Sex, Urgency } from '@weighhouse/shared/contracts/cases';
 import type { RoundKind } from '@weighhouse/shared/contracts/rounds';
-import { Column, Entity, Index, PrimaryColumn, VersionColumn } from 'typeorm';
-import { moment, numeric } from '../platform/database/columns.js';
+import { Column, Entity, Index, PrimaryColumn } from 'typeorm';
+import { moment } from '../platform/database/columns.js';
 
 /** One patient's one question, from referral to outcome. Who the patient is stands elsewhere, encrypted. */
 @Entity('case_file')
@@ -17,8 +17,8 @@ export class CaseFile {
   @Column('varchar', { length: 20 })
   state: CaseState;
 
-  /** Guards the draft against two writers. */
-  @VersionColumn()
+  /** Guards the draft against two writers. Only a save of the draft raises it, so that an upload is no conflict. */
+  @Column('int', { default: 1 })
   version: number;
 
   /** Rises with every change that the team may have to see; never with a save in a sealed round. */
@@ -61,10 +61,10 @@ export class CaseFile {
   @Column('int', { default: 3 })
   quorum: number;
 
-  @Column(numeric(4, 3))
+  @Column('double')
   tempering: number;
 
-  @Column(numeric(4, 3))
+  @Column('double')
   coexistence: number;
 
   @Column('int', { default: 0 })

@@ -1,6 +1,6 @@
 import type { Part } from '@weighhouse/shared/contracts/cases';
 import { Column, Entity, Index, PrimaryGeneratedColumn } from 'typeorm';
-import { moment, numeric } from '../platform/database/columns.js';
+import { moment } from '../platform/database/columns.js';
 
 /** One person's part on one case. A person may hold several parts, each in a row of its own. */
 @Entity('team_member')
@@ -20,7 +20,7 @@ export class TeamMember {
   part: Part;
 
   /** Contributors alone: 0 to 3. */
-  @Column(numeric(4, 3, { nullable: true }))
+  @Column('double', { nullable: true })
   weight: number | null;
 
   @Column('text', { nullable: true })

@@ -1,2 +1,4 @@
+import { ReportRow } from './report.entity.js';
+
 /** The tables of this domain. */
-export const reportsEntities: (new () => object)[] = [];
+export const reportsEntities = [ReportRow];
