@@ -16,7 +16,7 @@ export { type Fault, PanelRefused } from './validation/panel-refused.js';
  * are fractions. With `only: 'standing'` just the standing is computed.
  *
  * @throws PanelRefused, its `errors` naming every fault with its path
- * @example assess({ candidates: ['a'], contributors: [{ id: 'c', prior: [0.25, 0.75] }] }).standing // [0.25, 0.75]
+ * @example assess({ candidates: ['a'], contributors: [{ id: 'c', prior: [0.5, 0.5] }] }).standing // [0.5, 0.5]
  */
 export function assess(panel: unknown, options: { only: 'standing' }): StandingOnly;
 export function assess(panel: Panel): Assessment;

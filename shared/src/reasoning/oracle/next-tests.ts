@@ -1,4 +1,5 @@
 import type { NextTest } from '../assessment.js';
+import { descending } from '../descending.js';
 import type { CheckedFinding, CheckedPanel } from '../validation/checked-panel.js';
 import { at, sum, upTo } from './at.js';
 import { reportedGivenSet } from './level-given-set.js';
@@ -71,18 +72,5 @@ export function nextTests(
     frontier: !costed.some((other) => outdoes(other, at(costed, index))),
     levels: test.levels,
   }));
-  return inOrder(marked);
-}
-
-/** Bits descending; those within 1e-12 of the first of their run stay in panel order. */
-function inOrder(tests: readonly NextTest[]): NextTest[] {
-  const position = new Map(tests.map((test, index) => [test, index]));
-  const sorted = [...tests].sort((one, other) => other.bits - one.bits);
-  const ordered: NextTest[] = [];
-  while (ordered.length < sorted.length) {
-    const rest = sorted.slice(ordered.length);
-    const run = rest.filter((test) => test.bits >= at(rest, 0).bits - 1e-12);
-    ordered.push(...run.sort((one, other) => (position.get(one) ?? 0) - (position.get(other) ?? 0)));
-  }
-  return ordered;
+  return descending(marked, ({ bits }) => bits);
 }

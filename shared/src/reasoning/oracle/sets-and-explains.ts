@@ -1,15 +1,13 @@
 import type { CandidateSet, Explanation } from '../assessment.js';
+import { descending } from '../descending.js';
 import type { CheckedPanel } from '../validation/checked-panel.js';
 import { at, sum, upTo } from './at.js';
 import { type Posterior, standingOf } from './posterior.js';
 
 /** The most probable sets, at most 8; equal ones with fewer members first, then in panel order. */
 export function mostProbableSets({ sets, shares }: Posterior): CandidateSet[] {
-  return sets
-    .map((members, index) => ({ members, p: at(shares, index) }))
-    .filter(({ p }) => p > 0)
-    .sort((one, other) => other.p - one.p)
-    .slice(0, 8);
+  const listed = sets.map((members, index) => ({ members, p: at(shares, index) })).filter(({ p }) => p > 0);
+  return descending(listed, ({ p }) => p).slice(0, 8);
 }
 
 /** The five largest drops P(i) - P(i | k) over ordered pairs, when sets of two or more are counted. */
@@ -19,7 +17,7 @@ export function explanations(panel: CheckedPanel, now: Posterior): Explanation[]
   const standing = standingOf(now, panel.candidates);
   const both = (one: number, other: number) =>
     sum(shares.filter((_, index) => at(sets, index).includes(one) && at(sets, index).includes(other)));
-  return upTo(panel.candidates)
+  const drops = upTo(panel.candidates)
     .flatMap((given) =>
       upTo(panel.candidates)
         .filter((then) => then !== given && at(standing, given) > 0)
@@ -30,7 +28,6 @@ export function explanations(panel: CheckedPanel, now: Posterior): Explanation[]
           to: both(given, then) / at(standing, given),
         })),
     )
-    .filter(({ from, to }) => from - to > 1e-12)
-    .sort((one, other) => other.from - other.to - (one.from - one.to))
-    .slice(0, 5);
+    .filter(({ from, to }) => from - to > 1e-12);
+  return descending(drops, ({ from, to }) => from - to).slice(0, 5);
 }
