@@ -3,8 +3,7 @@ import { doneSchema } from '@weighhouse/shared/contracts/common';
 import { changePasswordSchema } from '@weighhouse/shared/contracts/people';
 import type { z } from 'zod';
 import { Access } from '../platform/http/access.decorator.js';
-import type { Actor } from '../platform/http/actor.js';
-import { CurrentActor } from '../platform/http/actor.js';
+import { type Actor, CurrentActor } from '../platform/http/actor.js';
 import { Answers } from '../platform/http/answers.decorator.js';
 import { MeService } from './me.service.js';
 

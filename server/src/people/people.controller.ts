@@ -12,8 +12,7 @@ import {
 } from '@weighhouse/shared/contracts/people';
 import type { z } from 'zod';
 import { Access } from '../platform/http/access.decorator.js';
-import type { Actor } from '../platform/http/actor.js';
-import { CurrentActor } from '../platform/http/actor.js';
+import { type Actor, CurrentActor } from '../platform/http/actor.js';
 import { Answers } from '../platform/http/answers.decorator.js';
 import { ChangePeopleService } from './change-people.service.js';
 import { InvitePeopleService } from './invite-people.service.js';

@@ -4,8 +4,7 @@ import { type Me, meSchema, type SignIn, signInSchema } from '@weighhouse/shared
 import type { Response } from 'express';
 import { type Configuration, CONFIGURATION } from '../platform/config/configuration.js';
 import { Access } from '../platform/http/access.decorator.js';
-import type { Actor } from '../platform/http/actor.js';
-import { CurrentActor } from '../platform/http/actor.js';
+import { type Actor, CurrentActor } from '../platform/http/actor.js';
 import { Answers } from '../platform/http/answers.decorator.js';
 import { MeService } from './me.service.js';
 import { absoluteLifeMs, cookieOptions, sessionCookie } from './session-cookie.js';
