@@ -49,8 +49,6 @@ export function patientWords({ age, sex }: { age: number | null; sex: Sex | null
   return `${years}, ${people[sex][age !== null && age < adult ? 0 : 1]}`;
 }
 
-type Standing = Pick<Case, 'state' | 'round'>;
-
 type Standing = Pick<CaseListItem, 'state' | 'round'>;
 
 /** What is so on the case, with its round: "Round 1, sealed. 2 of 5 in." */

@@ -11,7 +11,7 @@ export function useSignOut() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: ({ everywhere }: { everywhere: boolean }) =>
-      request('DELETE', everywhere ? '/api/session/all' : '/api/session', {
+      request('DELETE', everywhere ? '/api/sessions' : '/api/session', {
         schema: doneSchema,
         wait: false,
       }),
