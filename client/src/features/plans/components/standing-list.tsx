@@ -1,0 +1,32 @@
+import { naturalFrequency } from '@weighhouse/shared/reasoning/natural-frequency';
+import './standing-list.css';
+
+export interface Standing {
+  name: string;
+  /** 0 to 1. */
+  share: number;
+  /** The column none of these is slate. */
+  none: boolean;
+}
+
+/** Where the panel stands: a name, a bar from zero and its natural frequency for each candidate. */
+export function StandingList({ standing, label }: { standing: readonly Standing[]; label: string }) {
+  return (
+    <ul className="standing-list" aria-label={label}>
+      {standing.map(({ name, share, none }) => {
+        const { words, percent } = naturalFrequency(share);
+        return (
+          <li key={name}>
+            <span className="standing-name">{name}</span>
+            <span className="standing-lane" aria-hidden="true">
+              <span data-none={none || undefined} style={{ width: `${String(share * 100)}%` }} />
+            </span>
+            <span className="standing-figures figures">
+              <b>{percent}</b> <span className="soft">{words} like this</span>
+            </span>
+          </li>
+        );
+      })}
+    </ul>
+  );
+}
