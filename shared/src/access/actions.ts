@@ -58,6 +58,7 @@ export const rules = {
   'round.unseal': { parts: ['chair'], states: ['judging'], needsRound: true },
   'round.close': { parts: ['chair'], states: ['judging'], needsRound: true },
   'judgement.give': { parts: ['contributor'], states: ['judging'], needsRound: true },
+  'judgement.draft': { parts: ['contributor'], states: ['judging'] },
   'judgement.handIn': { parts: ['contributor'], states: ['judging'], needsRound: true },
   'differential.read': { parts: team, anyChairWhileSubmitted: true },
   'seal.read': { parts: team },
