@@ -22,7 +22,12 @@ const sections: RouteObject[] = [
   lazy('history', () => import('../features/cases/routes/history')),
   lazy('reports', () => import('../features/reports/routes/reports')),
   lazy('differential', () => import('../features/differential/routes/differential')),
-  lazy('plan', () => import('../features/plans/routes/plan')),
+  lazy('plan', () => import('../features/plans/routes/plan'), [
+    {
+      index: true,
+      lazy: async () => ({ Component: (await import('../features/outcomes/routes/outcome')).default }),
+    },
+  ]),
   lazy('summary', () => import('../features/summaries/routes/summary')),
   lazy('trail', () => import('../features/trail/routes/trail')),
 ];

@@ -1,7 +1,7 @@
 import { Button, TextArea, TextField } from '@radix-ui/themes';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
 import { type OutcomeInput, outcomeInputSchema } from '@weighhouse/shared/contracts/outcomes';
-import { type FormEvent, useState } from 'react';
+import { type SubmitEvent, useState } from 'react';
 import { ConfirmDialog } from '../../../components/confirm-dialog';
 import { ErrorSummary } from '../../../components/error-summary';
 import { faultsIn } from '../../../components/faults';
@@ -33,7 +33,7 @@ export function OutcomeForm({ caseId, onClose }: { caseId: string; onClose: () =
   const { candidate, ...rest } = typed;
   const input: OutcomeInput = { ...rest, candidateId: candidate === none ? null : candidate };
 
-  const check = (event: FormEvent) => {
+  const check = (event: SubmitEvent) => {
     event.preventDefault();
     const found = faultsIn(outcomeInputSchema, input).filter((fault) => fault.path !== 'candidateId');
     if (candidate === '')

@@ -1,12 +1,12 @@
 import { Button, TextArea } from '@radix-ui/themes';
 import { type Plan, actionDoneSchema } from '@weighhouse/shared/contracts/plans';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
-import { type FormEvent, useState } from 'react';
+import { type SubmitEvent, useState } from 'react';
 import { FailureLine } from '../../../components/failure';
 import { faultsIn } from '../../../components/faults';
 import { FormField } from '../../../components/form-field';
 import { useReportAction } from '../api/report-action';
-import { useKeptText } from '../drafts/use-kept-text';
+import { useKeptText } from '../../../lib/use-kept-text';
 
 interface Props {
   caseId: string;
@@ -21,7 +21,7 @@ export function ActionDone({ caseId, action, onClose }: Props) {
   const report = useReportAction(caseId, action.id);
   const path = `done-${action.id}`;
 
-  const send = (event: FormEvent) => {
+  const send = (event: SubmitEvent) => {
     event.preventDefault();
     const found = faultsIn(actionDoneSchema, { words }).map((fault) => ({ ...fault, path }));
     setFaults(found);

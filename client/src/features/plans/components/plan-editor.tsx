@@ -6,8 +6,8 @@ import { ErrorSummary } from '../../../components/error-summary';
 import { FailureLine } from '../../../components/failure';
 import { SaveState } from '../../../components/save-state';
 import { staleDraft, useSavePlan } from '../api/save-plan';
-import type { DraftKind } from '../drafts/draft-keeper';
-import { useDraftKeeper } from '../drafts/use-draft-keeper';
+import type { DraftKind } from '../../../lib/draft-keeper';
+import { useDraftKeeper } from '../../../lib/use-draft-keeper';
 import {
   adoptIds,
   draftOf,

@@ -1,13 +1,13 @@
 import { Button, TextArea } from '@radix-ui/themes';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
 import { dissentSchema, type Plan } from '@weighhouse/shared/contracts/plans';
-import { type FormEvent, useState } from 'react';
+import { type SubmitEvent, useState } from 'react';
 import { FailureLine } from '../../../components/failure';
 import { faultsIn } from '../../../components/faults';
 import { FormField } from '../../../components/form-field';
 import { useFormat } from '../../../lib/use-format';
 import { useGiveStance } from '../api/give-stance';
-import { useKeptText } from '../drafts/use-kept-text';
+import { useKeptText } from '../../../lib/use-kept-text';
 
 interface Props {
   caseId: string;
@@ -98,7 +98,7 @@ function DissentForm({ planId, before, give, onClose }: DissentProps) {
   const [touched, setTouched] = useState(false);
   const text = touched || words !== '' ? words : before;
 
-  const send = (event: FormEvent) => {
+  const send = (event: SubmitEvent) => {
     event.preventDefault();
     const found = faultsIn(dissentSchema, { words: text });
     setFaults(found);

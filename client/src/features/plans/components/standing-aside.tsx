@@ -5,7 +5,6 @@ import { Failure } from '../../../components/failure';
 import { SealedMark } from '../../../components/sealed-mark';
 import { SkeletonText } from '../../../components/skeleton';
 import { useDifferential } from '../../differential/api/get-differential';
-import { columnLabel, columnsOf } from '../../differential/model/columns';
 import { StandingList } from './standing-list';
 
 /** Where the panel stands now, beside the plan that is written from it. */
@@ -43,17 +42,20 @@ function Now({ differential }: { differential: Differential }) {
         </p>
       )}
       {standing ? (
-        <StandingList
-          label="Where the panel stands now"
-          standing={columnsOf(candidates).map((column) => ({
-            name: columnLabel(column),
-            share: standing[column.index] ?? 0,
-            none: column.none,
-          }))}
-        />
+        <StandingList label="Where the panel stands now" standing={namedStanding(candidates, standing)} />
       ) : (
         !sealed && <p className="small soft">Nothing is pooled yet. It begins when a round is unsealed.</p>
       )}
     </>
   );
+}
+
+/** The columns by name, none of these last, as assess() answers them. */
+function namedStanding(candidates: Differential['candidates'], shares: readonly number[]) {
+  const names = candidates.filter((one) => !one.retired).map((one) => one.name);
+  return [...names, 'None of these'].map((name, place) => ({
+    name,
+    share: shares[place] ?? 0,
+    none: place === names.length,
+  }));
 }

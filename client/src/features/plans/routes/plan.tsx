@@ -2,12 +2,12 @@ import '../components/plan.css';
 import type { Case } from '@weighhouse/shared/contracts/cases';
 import type { PersonRef } from '@weighhouse/shared/contracts/common';
 import type { PlanView } from '@weighhouse/shared/contracts/plans';
+import { Outlet } from 'react-router-dom';
 import { EmptyState } from '../../../components/empty-state';
 import { Failure } from '../../../components/failure';
 import { SkeletonText } from '../../../components/skeleton';
 import { useCase, useCaseId } from '../../cases/api/get-case';
 import { useDifferential } from '../../differential/api/get-differential';
-import { OutcomePanel } from '../../outcomes/components/outcome-panel';
 import { useSignedIn } from '../../people/api/get-me';
 import { usePlan } from '../api/get-plan';
 import { DraftReading } from '../components/draft-reading';
@@ -17,7 +17,7 @@ import { SignedPlan } from '../components/signed-plan';
 import { StandingAside } from '../components/standing-aside';
 import { planTitle } from '../model/plan-words';
 
-/** The plan section of a case: the draft, the signed plans, the outcome. */
+/** The plan section of a case: the draft, the signed plans, and the outcome as its child route. */
 export default function PlanSection() {
   const caseId = useCaseId();
   const plan = usePlan(caseId);
@@ -78,7 +78,7 @@ function Loaded({ view, ofCase }: { view: PlanView; ofCase: Case }) {
       {signed.length > 0 && (
         <Downloads caseId={ofCase.id} number={ofCase.number} abilities={ofCase.abilities} />
       )}
-      <OutcomePanel caseId={ofCase.id} mayRecord={ofCase.abilities.includes('outcome.record')} />
+      <Outlet />
     </div>
   );
 }

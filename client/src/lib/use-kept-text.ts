@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { forget, keep, kept } from '../../../lib/kept';
+import { forget, keep, kept } from './kept';
 
 /** Text of a form that is sent as a whole; it survives a closed tab until `clear`. */
 export function useKeptText(key: string): [string, (text: string) => void, () => void] {

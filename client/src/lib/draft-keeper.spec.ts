@@ -1,5 +1,5 @@
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
-import { ApiError } from '../../../lib/api';
+import { ApiError } from './api';
 import { DraftKeeper, type DraftKind, type Stored } from './draft-keeper';
 
 const browser = new Map<string, string>();

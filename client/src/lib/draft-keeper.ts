@@ -1,6 +1,6 @@
-import { type ApiError, isApiError } from '../../../lib/api';
-import { forget, keep, kept } from '../../../lib/kept';
-import type { Saving } from '../../../components/save-state';
+import { type ApiError, isApiError } from './api';
+import { forget, keep, kept } from './kept';
+import type { Saving } from './draft-saver';
 
 /** A text as the server has it. */
 export interface Stored<T> {
