@@ -63,7 +63,8 @@ async function centreFor(em: EntityManager, named: string | undefined, now: Date
 /** A short name from the initials of the long one, with a figure where it is taken. */
 export function codeFor(name: string, taken: readonly string[]): string {
   const words = name.toUpperCase().match(/[\p{L}\p{N}]+/gu) ?? [];
-  const initials = words.length > 1 ? words.map((word) => Array.from(word)[0]).join('') : (words[0] ?? 'CENTRE');
+  const initials =
+    words.length > 1 ? words.map((word) => Array.from(word)[0]).join('') : (words[0] ?? 'CENTRE');
   const code = Array.from(initials).slice(0, 6).join('');
   const isTaken = (text: string) => taken.some((other) => other.toUpperCase() === text);
   if (!isTaken(code)) return code;

@@ -34,6 +34,7 @@ export class PasswordsService {
     if (!(await passwordMatches(row?.passwordHash ?? null, password))) {
       throw new Refusal('wrong-password', 'That is not your password.');
     }
+    this.limits.succeeded('confirmation', actor.id);
   }
 
   /** Sets a password and with it accepts the invitation, if it was the first. */

@@ -36,7 +36,8 @@ export class SignInGuard extends AuthGuard('password') {
         input.error.issues.map((issue) => ({ path: fieldPath(issue.path), message: issue.message })),
       );
     }
-    await this.limits.take('account', `${address} ${input.data.email}`);
+    const account = `${address} ${input.data.email}`;
+    await this.limits.take('account', account);
     request.body = input.data;
     try {
       await super.canActivate(context);
@@ -44,6 +45,7 @@ export class SignInGuard extends AuthGuard('password') {
       if (error instanceof Refusal) await this.recordRefusal();
       throw error;
     }
+    this.limits.succeeded('account', account);
     return true;
   }
 

@@ -15,6 +15,7 @@ export class Refusal extends HttpException {
   ) {
     const body: ErrorBody = { error: { id, message, ...details } };
     super(body, errorStatus[id]);
+    this.message = message;
   }
 }
 
