@@ -1,8 +1,8 @@
 import { Injectable } from '@nestjs/common';
 import type { Exposure, SavedJudgement } from '@weighhouse/shared/contracts/judgements';
 import type { EntityManager } from 'typeorm';
+import type { OpenedCase } from '../../cases/case-access.js';
 import { CaseChanges } from '../../cases/case-changes.js';
-import type { CaseFile } from '../../cases/case-file.entity.js';
 import { AuditLog } from '../../platform/audit-log/audit-log.js';
 import { Clock } from '../../platform/clock/clock.js';
 import type { Work } from '../../platform/database/unit-of-work.js';
@@ -48,7 +48,7 @@ export class JudgementWriter {
   /** @param file the case's row, locked, so that the next version is free and the round stays what it is */
   async write(
     work: Work,
-    file: CaseFile,
+    file: OpenedCase['file'],
     actor: Actor,
     judgement: CheckedJudgement,
   ): Promise<SavedJudgement> {

@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import type { EntityManager } from 'typeorm';
-import type { CaseFile } from '../../cases/case-file.entity.js';
+import type { OpenedCase } from '../../cases/case-access.js';
 import type { CasePool } from '../pool/case-pool.js';
 import { Evidence } from '../pool/evidence.js';
 import { JudgementStore } from './judgement-store.js';
@@ -25,7 +25,7 @@ export class OwnJudgements {
   ) {}
 
   async read(
-    file: Pick<CaseFile, 'id' | 'candidateSet'>,
+    file: Pick<OpenedCase['file'], 'id' | 'candidateSet'>,
     personId: string,
     em: EntityManager,
   ): Promise<OwnJudgement> {

@@ -1,8 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { Injectable, type OnModuleInit } from '@nestjs/common';
 import type { EntityManager } from 'typeorm';
-import { CaseChanges } from '../../cases/case-changes.js';
-import type { CaseFile } from '../../cases/case-file.entity.js';
+import { CaseChanges, type Consequence } from '../../cases/case-changes.js';
 import { Clock } from '../../platform/clock/clock.js';
 import { Assessments } from './assessments.js';
 import { type CasePool, openRound, panelOf } from './case-pool.js';
@@ -41,7 +40,7 @@ export class StandingService implements OnModuleInit {
   ) {}
 
   onModuleInit(): void {
-    this.changes.follow((em, file, what) => this.columnsAfter(em, file, what));
+    this.changes.follow(this.columnsAfter);
   }
 
   /** The standing to push; null while a sealed round is open or nothing may be seen yet. */
@@ -113,18 +112,14 @@ export class StandingService implements OnModuleInit {
   }
 
   /** The list's columns after a change, by what may be seen: a sealed round's numbers never reach them. */
-  private async columnsAfter(
-    em: EntityManager,
-    file: Readonly<CaseFile>,
-    what: string,
-  ): Promise<Partial<CaseFile>> {
+  private readonly columnsAfter: Consequence = async (em, file, what) => {
     if (!movers.includes(what) || file.roundNumber === null) return {};
     const pool = await this.pools.read(file.id, em);
     return {
       ...leaderColumns(pool, this.assessments.compute(panelOf(pool, 'named'))),
       roundHandedIn: handedInNow(pool),
     };
-  }
+  };
 }
 
 /** How many of the contributors now have handed in, in the open or last round. */

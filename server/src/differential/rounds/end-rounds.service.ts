@@ -3,7 +3,6 @@ import type { Round } from '@weighhouse/shared/contracts/rounds';
 import type { EntityManager } from 'typeorm';
 import { CaseAccess, type OpenedCase } from '../../cases/case-access.js';
 import { CaseChanges } from '../../cases/case-changes.js';
-import type { CaseFile } from '../../cases/case-file.entity.js';
 import { TeamReader } from '../../cases/team-reader.js';
 import { Clock } from '../../platform/clock/clock.js';
 import { UnitOfWork, type Work } from '../../platform/database/unit-of-work.js';
@@ -77,7 +76,7 @@ export class EndRoundsService {
    * Closes the live round that is open when a plan is signed; does nothing where none is.
    * @returns the columns to write with the change of the case
    */
-  async closeForConclusion(work: Work, caseId: string): Promise<Partial<CaseFile>> {
+  async closeForConclusion(work: Work, caseId: string): Promise<{ roundOpen?: false }> {
     const round = await this.rounds.openOf(caseId, work.em);
     if (!round) return {};
     const { personIds } = await this.absentFrom(round, work.em);
@@ -129,7 +128,7 @@ export class EndRoundsService {
   private async tell(
     work: Work,
     actor: Actor,
-    file: CaseFile,
+    file: OpenedCase['file'],
     round: RoundRow,
     line: { action: string; sentence: string },
   ): Promise<Round> {

@@ -3,9 +3,8 @@ import { Injectable } from '@nestjs/common';
 import type { SealedDocument } from '@weighhouse/shared/contracts/rounds';
 import { canonicalText, randomLength, sealDigest, toHex } from '@weighhouse/shared/seals/seal';
 import type { EntityManager } from 'typeorm';
-import { CaseAccess } from '../../cases/case-access.js';
+import { CaseAccess, type OpenedCase } from '../../cases/case-access.js';
 import { CaseChanges } from '../../cases/case-changes.js';
-import type { CaseFile } from '../../cases/case-file.entity.js';
 import { Clock } from '../../platform/clock/clock.js';
 import { UnitOfWork } from '../../platform/database/unit-of-work.js';
 import { notFound, notReady, Refusal, stale } from '../../platform/errors/refusal.js';
@@ -76,7 +75,7 @@ export class HandInsService {
   }
 
   private async toHandIn(
-    file: CaseFile,
+    file: OpenedCase['file'],
     roundId: string,
     personId: string,
     seen: number | undefined,
