@@ -16,6 +16,11 @@ export class CaseDirectory {
     return em.findOneBy(CaseFile, { id: caseId });
   }
 
+  /** As byId, and locks the row until the end of the transaction: for changes whose right does not come from a part. */
+  async lock(caseId: string, em: EntityManager): Promise<CaseFile | null> {
+    return em.findOne(CaseFile, { where: { id: caseId }, lock: { mode: 'pessimistic_write' } });
+  }
+
   /** @param ids may repeat; unknown ones are left out of the answer */
   async byIds(
     ids: readonly string[],

@@ -58,6 +58,8 @@ export const stanceOfSchema = z
     stance: stanceSchema.nullable(),
     words: z.string().nullable(),
     at: momentSchema.nullable(),
+    /** The plan was changed after this was said. */
+    changedSince: z.boolean().optional(),
   })
   .meta({ id: 'Stance' });
 
