@@ -1,6 +1,6 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { type JudgeFinding, savedJudgementSchema } from '@weighhouse/shared/contracts/judgements';
-import { put } from '../../../lib/api';
+import { isApiError, put } from '../../../lib/api';
 import { refreshDifferential, takeOwnVersion } from './refresh-differential';
 
 /** Saves one's own likelihoods of a row as a new version; every cell null takes the row's judgement back. */
@@ -13,5 +13,7 @@ export function useSaveRowJudgement(caseId: string) {
       takeOwnVersion(client, caseId, version);
       return refreshDifferential(client, caseId);
     },
+    // What is new has to be on the screen before anybody can choose.
+    onError: (error) => (isApiError(error, 'stale') ? refreshDifferential(client, caseId) : undefined),
   });
 }

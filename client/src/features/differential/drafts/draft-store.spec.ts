@@ -60,7 +60,7 @@ describe('the drafts', () => {
     const store = new DraftStore(world.around);
     store.type('f1', typed('65'));
     await vi.advanceTimersByTimeAsync(quietBeforeSending);
-    expect(store.saving('f1')).toEqual({ state: 'failed', offline: true });
+    expect(store.saving('f1')).toMatchObject({ state: 'failed', offline: true });
     expect(world.memory.has('f1')).toBe(true);
 
     world.goOffline(false);

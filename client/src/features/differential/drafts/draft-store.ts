@@ -117,7 +117,7 @@ export class DraftStore {
     } catch (error) {
       if (this.#entries.get(target)?.draft !== draft) return;
       const offline = isApiError(error, 'offline');
-      this.#say(target, { state: 'failed', offline });
+      this.#say(target, { state: 'failed', offline, error });
       if (offline) this.#later(target, pauseBeforeRetry);
     }
   }

@@ -1,4 +1,4 @@
-import { type CSSProperties, Fragment, useState } from 'react';
+import { type CSSProperties, useState } from 'react';
 import { useGrid } from '../grid/use-grid';
 import type { Place } from '../grid/movement';
 import { rowGroups } from '../model/rows';
@@ -61,7 +61,7 @@ export function LedgerTable({ compact }: { compact: boolean }) {
     },
   );
 
-  let index = 0;
+  const placeOfRow = new Map(rows.map((finding, index) => [finding.id, index + 1]));
   return (
     <div
       ref={frame}
@@ -90,14 +90,9 @@ export function LedgerTable({ compact }: { compact: boolean }) {
                 <span>{group.title}</span>
               </th>
             </tr>
-            {group.rows.map((finding) => {
-              index += 1;
-              return (
-                <Fragment key={finding.id}>
-                  <FindingRow finding={finding} row={index} />
-                </Fragment>
-              );
-            })}
+            {group.rows.map((finding) => (
+              <FindingRow key={finding.id} finding={finding} row={placeOfRow.get(finding.id) ?? 0} />
+            ))}
           </tbody>
         ))}
         <tfoot>

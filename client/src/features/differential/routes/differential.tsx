@@ -1,5 +1,41 @@
-import { EmptyState } from '../../../components/empty-state';
+import { useSearchParams } from 'react-router-dom';
+import { Failure } from '../../../components/failure';
+import { SkeletonRows } from '../../../components/skeleton';
+import { useCaseId } from '../../cases/api/get-case';
+import { useDifferential } from '../api/get-differential';
+import { DraftsProvider } from '../drafts/drafts-context';
+import { LedgerProvider, type Panel } from '../ledger/ledger-context';
+import { LedgerScreen } from '../ledger/ledger-screen';
+import '../ledger/ledger.css';
+import '../ledger/side.css';
 
-export default function NotBuilt() {
-  return <EmptyState title="This section is not part of this version." />;
+/** The differential: the ledger of a case. */
+export default function DifferentialRoute() {
+  const caseId = useCaseId();
+  const found = useDifferential(caseId);
+  const [params] = useSearchParams();
+  if (found.data)
+    return (
+      <DraftsProvider key={caseId} differential={found.data}>
+        <LedgerProvider differential={found.data} first={firstPanel(params)}>
+          <LedgerScreen />
+        </LedgerProvider>
+      </DraftsProvider>
+    );
+  return (
+    <div className="page">
+      {found.isPending ? (
+        <SkeletonRows rows={8} />
+      ) : (
+        <Failure error={found.error} what="The differential could not be opened." retry={() => void found.refetch()} />
+      )}
+    </div>
+  );
+}
+
+/** A link can lead to a finding, or to adding one from a page of a report. */
+function firstPanel(params: URLSearchParams): Panel | null {
+  const findingId = params.get('finding');
+  if (findingId === 'new') return { kind: 'finding', findingId: null };
+  return findingId === null ? null : { kind: 'row', findingId, at: null };
 }

@@ -1,0 +1,64 @@
+import { naturalFrequency } from '@weighhouse/shared/reasoning/natural-frequency';
+import { useState } from 'react';
+import { ShareBar } from '../../../components/marks/share-bar';
+import { useLedger } from '../ledger/ledger-context';
+import { MovingFigure } from '../ledger/moving-figure';
+import { type Column, columnLabel } from '../model/columns';
+import { leadingColumns } from '../model/leading-columns';
+import { standingSentence, standingView } from '../model/standing-view';
+
+/** Where the panel stands, at the bottom of a phone: the leading candidates, and all of them on demand. */
+export function CompactStanding() {
+  const { differential, columns } = useLedger();
+  const [all, setAll] = useState(false);
+  const standing = differential.assessment?.standing ?? differential.mine?.standing ?? null;
+  const shown = all ? columns : leadingColumns(columns, standing, 3);
+  const sealed = differential.sealed && !differential.assessment;
+  return (
+    <section className="compact-standing" aria-label="Where the panel stands">
+      <div className="compact-head">
+        <h2>Where the panel stands</h2>
+        <button
+          type="button"
+          className="text-button"
+          aria-expanded={all}
+          onClick={() => {
+            setAll(!all);
+          }}
+        >
+          {all ? 'Fewer' : `All ${String(columns.length)}`}
+        </button>
+      </div>
+      {sealed && <p className="small soft">Sealed until the chair unseals the round.</p>}
+      {!sealed && !differential.assessment && <p className="small soft">Nothing judged yet.</p>}
+      <ul>
+        {shown.map((column) => (
+          <Line key={column.id} column={column} />
+        ))}
+      </ul>
+    </section>
+  );
+}
+
+function Line({ column }: { column: Column }) {
+  const { differential } = useLedger();
+  const view = standingView(differential, column.index);
+  return (
+    <li>
+      <span className="cell-list-name">{columnLabel(column)}</span>
+      {view.sealed ? (
+        <span className="ledger-sealed" aria-hidden="true" />
+      ) : (
+        <ShareBar share={view.share} ticks={view.ticks} own={view.own} none={column.none} />
+      )}
+      <span className="compact-share figures">
+        {view.share !== null && <MovingFigure share={view.share} percent />}
+        {view.share === null && view.own !== null && `you ${naturalFrequency(view.own).percent}`}
+      </span>
+      <span className="aside-text">
+        {view.share !== null && `${naturalFrequency(view.share).words} like this. `}
+        {standingSentence(view)}
+      </span>
+    </li>
+  );
+}

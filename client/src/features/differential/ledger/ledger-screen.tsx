@@ -1,0 +1,99 @@
+import { Button } from '@radix-ui/themes';
+import { useRef } from 'react';
+import { Caution } from '../../../components/caution';
+import { MarksKey } from '../../../components/marks/marks-key';
+import { LedgerCards } from '../cards/ledger-cards';
+import { SidePanel } from '../panels/side-panel';
+import { PriorFirst } from '../prior-first/prior-first';
+import { RoundBar } from '../rounds/round-bar';
+import { useSeenDigests } from '../seals/use-seen-digests';
+import { EmptyLedger } from './empty-ledger';
+import { useLedger } from './ledger-context';
+import { LedgerTable } from './ledger-table';
+import { PriorAgain } from './prior-again';
+import { StandingAnnouncements } from './standing-announcements';
+import { useCompact } from './use-compact';
+import { usePhone } from './use-media';
+
+/** The whole section: the round, the ledger, and what stands at its side. */
+export function LedgerScreen() {
+  const { differential, canJudge, columns, rows, open, may } = useLedger();
+  const phone = usePhone();
+  const [compact, setCompact] = useCompact();
+  const main = useRef<HTMLDivElement>(null);
+  useSeenDigests(differential.round);
+
+  // The prior comes before the rows, so that the findings are not counted twice.
+  if (canJudge && differential.mine?.prior === null) return <PriorFirst />;
+  const empty = columns.length === 1 && rows.length === 0;
+  return (
+    <section className="ledger-section" aria-label="Differential">
+      <RoundBar>
+        {!phone && !empty && (
+          <Button
+            variant="ghost"
+            aria-pressed={compact}
+            onClick={() => {
+              setCompact(!compact);
+            }}
+          >
+            {compact ? 'Wider rows' : 'Narrower rows'}
+          </Button>
+        )}
+      </RoundBar>
+      <PriorAgain />
+      <div className="ledger-work">
+        <div ref={main} className="ledger-main">
+          {empty ? <EmptyLedger /> : phone ? <LedgerCards /> : <LedgerTable compact={compact} />}
+          <div className="ledger-foot">
+            {!empty && (
+              <MarksKey
+                own={differential.mine !== null}
+                sealed={differential.assessment === null && differential.sealed}
+                before={differential.before !== null && differential.assessment !== null}
+              />
+            )}
+            <div className="actions no-print ledger-add">
+              {may('finding.add') && (
+                <Button
+                  variant="outline"
+                  onClick={() => {
+                    open({ kind: 'finding', findingId: null });
+                  }}
+                >
+                  Add a finding
+                </Button>
+              )}
+              <Button
+                variant="outline"
+                onClick={() => {
+                  open({ kind: 'candidates' });
+                }}
+              >
+                {may('candidate.add') ? 'Add or retire candidates' : 'Candidates'}
+              </Button>
+              {may('settings.change') && (
+                <Button
+                  variant="outline"
+                  onClick={() => {
+                    open({ kind: 'groups' });
+                  }}
+                >
+                  Findings that overlap
+                </Button>
+              )}
+            </div>
+            <Caution />
+          </div>
+        </div>
+        <SidePanel
+          onClosed={() => {
+            // Back to the cell that the person came from.
+            main.current?.querySelector<HTMLElement>('.ledger [tabindex="0"], .card button')?.focus();
+          }}
+        />
+      </div>
+      <StandingAnnouncements />
+    </section>
+  );
+}

@@ -1,0 +1,107 @@
+import { type ReactNode, useEffect, useRef } from 'react';
+import { CandidatesPanel } from '../../findings/components/candidates-panel';
+import { type Panel, useLedger } from '../ledger/ledger-context';
+import { FindingPanel } from './finding-panel';
+import { GroupsPanel } from './groups-panel';
+import { PooledPanel } from './pooled-panel';
+import { PriorPanel } from './prior-panel';
+import { RoundPanel } from './round-panel';
+import { RowPanel } from './row-panel';
+import { SealsPanel } from './seals-panel';
+import { WhyPanel } from './why-panel';
+
+interface Props {
+  /** Back to the grid, where the person came from. */
+  onClosed: () => void;
+}
+
+/** What stands at the side of the ledger; on a phone it comes from below. Without anything opened: the round. */
+export function SidePanel({ onClosed }: Props) {
+  const { panel, open } = useLedger();
+  const box = useRef<HTMLElement>(null);
+  const close = () => {
+    open(null);
+    onClosed();
+  };
+  useFocusOnOpen(box, panel);
+  return (
+    <aside
+      ref={box}
+      className="side"
+      data-open={panel !== null || undefined}
+      aria-label="At the side of the ledger"
+      onKeyDown={(event) => {
+        if (event.key === 'Escape' && panel && !event.defaultPrevented) {
+          event.preventDefault();
+          close();
+        }
+      }}
+    >
+      {panel && (
+        <button type="button" className="side-close" onClick={close}>
+          Close
+        </button>
+      )}
+      {contents(panel)}
+    </aside>
+  );
+}
+
+function contents(panel: Panel | null): ReactNode {
+  switch (panel?.kind) {
+    case 'row':
+      return <RowPanel key={panel.findingId} findingId={panel.findingId} />;
+    case 'prior':
+      return <PriorPanel />;
+    case 'why':
+      return <WhyPanel target={panel.target} column={panel.column} />;
+    case 'pooled':
+      return <PooledPanel />;
+    case 'seals':
+      return <SealsPanel />;
+    case 'candidates':
+      return <CandidatesPanel />;
+    case 'groups':
+      return <GroupsPanel />;
+    case 'finding':
+      return <FindingPanel key={panel.findingId} findingId={panel.findingId} />;
+    default:
+      return <RoundPanel />;
+  }
+}
+
+/**
+ * Moves the focus to where the person wants to go on: the field of the cell they typed or opened, with the digit
+ * they typed, else the heading.
+ */
+function useFocusOnOpen(box: React.RefObject<HTMLElement | null>, panel: Panel | null): void {
+  useEffect(() => {
+    if (!panel || !box.current) return;
+    const at = panel.kind === 'row' || panel.kind === 'prior' ? panel.at : null;
+    const field = at && box.current.querySelector<HTMLInputElement>(`[data-field="${at.columnId}"]`);
+    if (!field) {
+      box.current.querySelector<HTMLElement>('h2')?.focus();
+      return;
+    }
+    field.focus();
+    if (at.digit === null) field.select();
+    else typeDigit(field, at.digit);
+  }, [box, panel]);
+}
+
+/** As if the digit had been typed in the field: what stood there is replaced, and the form hears of it. */
+function typeDigit(field: HTMLInputElement, digit: string): void {
+  const setter = Object.getOwnPropertyDescriptor(HTMLInputElement.prototype, 'value')?.set;
+  setter?.call(field, digit);
+  field.dispatchEvent(new Event('input', { bubbles: true }));
+  field.setSelectionRange(digit.length, digit.length);
+}
+
+/** The heading of what stands at the side; it takes the focus when it is opened. */
+export function SideHeading({ children }: { children: ReactNode }) {
+  return (
+    <h2 className="side-heading" tabIndex={-1}>
+      {children}
+    </h2>
+  );
+}
