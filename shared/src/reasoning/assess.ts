@@ -1,5 +1,5 @@
+import { assessChecked, standingOfChecked } from './assess-checked.js';
 import type { Assessment, StandingOnly } from './assessment.js';
-import { assessPlainly, judgePlainly } from './oracle/assess-plainly.js';
 import type { Panel } from './panel.js';
 import { readPanel } from './validation/read-panel.js';
 
@@ -23,7 +23,5 @@ export function assess(panel: Panel): Assessment;
 export function assess(panel: unknown): Assessment;
 export function assess(panel: unknown, options: { only?: 'standing' } = {}): Assessment | StandingOnly {
   const checked = readPanel(panel);
-  if (options.only === 'standing')
-    return { method: 'weighhouse/1', standing: judgePlainly(checked).standing };
-  return assessPlainly(checked);
+  return options.only === 'standing' ? standingOfChecked(checked) : assessChecked(checked);
 }

@@ -31,7 +31,7 @@ export function judgePlainly(
  */
 export function assessPlainly(panel: CheckedPanel): Assessment {
   const { view, exponents: raised, now, standing } = judgePlainly(panel);
-  const views = panel.contributors.map((contributor) => ownView(contributor, view));
+  const views = panel.contributors.map((contributor) => ownView(panel, contributor, view));
   const own = views.map((one) => standingOf(posterior(panel, one, raised), panel.candidates));
   const ownAlone = views.map((one) => standingOf(posterior(panel, one, raised, 0), panel.candidates));
   const weights = panel.contributors.map(({ weight }) => weight);

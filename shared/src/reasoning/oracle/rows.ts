@@ -29,7 +29,7 @@ function furthestApart(panel: CheckedPanel, finding: number): FurthestApart | nu
   for (const column of upTo(panel.columns)) {
     for (const level of compared) {
       const judged = panel.contributors.flatMap((contributor) => {
-        const cell = contributor.weight > 0 ? cellOf(contributor, finding, column, levels) : null;
+        const cell = contributor.weight > 0 ? cellOf(contributor, at(panel.findings, finding), column) : null;
         return cell ? [{ contributor: contributor.id, p: at(cell, level) }] : [];
       });
       if (judged.length < 2) continue;
@@ -56,10 +56,10 @@ function swing(
   const pooled = at(view.rows, finding);
   if (!pooled) return 0;
   const changes = panel.contributors
-    .filter(({ weight, judgements }) => weight > 0 && judgements[finding])
+    .filter(({ weight, exposures }) => weight > 0 && exposures[finding] !== 0)
     .map((contributor) => {
       const rows = view.rows.map((row, index) =>
-        index === finding ? rowOf(contributor, finding, pooled) : row,
+        index === finding ? rowOf(contributor, at(panel.findings, finding), pooled) : row,
       );
       const swapped = standingOf(posterior(panel, { ...view, rows }, exponents), panel.candidates);
       return Math.abs(at(swapped, leader) - at(standing, leader));
@@ -74,16 +74,22 @@ export function assessRows(
   standing: readonly number[],
 ): Record<string, AssessedRow> {
   return keyed(
-    panel.findings.map(({ id, observed, reliability }, finding): [string, AssessedRow] => {
+    panel.findings.map((described, finding): [string, AssessedRow] => {
+      const { id, observed, reliability } = described;
       const row = at(view.rows, finding);
       const apart = furthestApart(panel, finding);
       const exponent = at(exponents, finding);
       const counts = row !== null && observed !== null;
       const by = panel.contributors.map((contributor): [string, (number | null)[]] => {
         if (!counts) return [contributor.id, []];
-        const decibans = weightOfEvidence(rowOf(contributor, finding, row), observed, reliability, exponent);
+        const decibans = weightOfEvidence(
+          rowOf(contributor, described, row),
+          observed,
+          reliability,
+          exponent,
+        );
         const cells = decibans.map((deciban, column) =>
-          cellOf(contributor, finding, column, at(row, 0).length) ? deciban : null,
+          cellOf(contributor, described, column) ? deciban : null,
         );
         return [contributor.id, cells];
       });

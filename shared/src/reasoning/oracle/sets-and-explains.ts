@@ -7,7 +7,7 @@ import { type Posterior, standingOf } from './posterior.js';
 /** The most probable sets, at most 8; equal ones with fewer members first, then in panel order. */
 export function mostProbableSets({ sets, shares }: Posterior): CandidateSet[] {
   const listed = sets.map((members, index) => ({ members, p: at(shares, index) })).filter(({ p }) => p > 0);
-  return descending(listed, ({ p }) => p).slice(0, 8);
+  return descending(listed, ({ p }) => Math.log(p), 1e-9).slice(0, 8);
 }
 
 /** The five largest drops P(i) - P(i | k) over ordered pairs, when sets of two or more are counted. */

@@ -1,4 +1,4 @@
-import type { CheckedContributor, CheckedPanel } from '../validation/checked-panel.js';
+import type { CheckedContributor, CheckedFinding, CheckedPanel } from '../validation/checked-panel.js';
 import { at, upTo } from './at.js';
 import { logPool } from './log-pool.js';
 
@@ -12,10 +12,9 @@ export interface View {
 }
 
 /** One contributor's cell, or null for a blank. */
-export function cellOf(contributor: CheckedContributor, finding: number, column: number, levels: number) {
-  const judgement = contributor.judgements[finding];
-  if (!judgement) return null;
-  const cell = Array.from(judgement.cells.subarray(column * levels, (column + 1) * levels));
+export function cellOf(contributor: CheckedContributor, { start, levels }: CheckedFinding, column: number) {
+  const from = start + column * levels;
+  const cell = Array.from(contributor.cells.subarray(from, from + levels));
   return cell[0] === 0 ? null : cell;
 }
 
@@ -33,16 +32,15 @@ export function pooledPrior(panel: CheckedPanel): number[] {
 
 /** The pooled cells of a finding before unjudged columns are filled in (null there). */
 export function judgedCells(panel: CheckedPanel, finding: number): (number[] | null)[] {
-  const { levels } = at(panel.findings, finding);
   const largest = Math.max(...panel.contributors.map(({ weight }) => weight));
   return upTo(panel.columns).map((column) => {
     const cells: number[][] = [];
     const weights: number[] = [];
     for (const contributor of counting(panel.contributors)) {
-      const cell = cellOf(contributor, finding, column, levels);
+      const cell = cellOf(contributor, at(panel.findings, finding), column);
       if (!cell) continue;
       cells.push(cell);
-      weights.push((contributor.weight / largest) * (contributor.judgements[finding]?.exposure ?? 0));
+      weights.push((contributor.weight / largest) * at(Array.from(contributor.exposures), finding));
     }
     return cells.length === 0 ? null : logPool(cells, weights);
   });
@@ -65,14 +63,14 @@ export function pooledView(panel: CheckedPanel): View {
 }
 
 /** The row with one contributor's cells in place of the pooled ones; blanks stay pooled. */
-export function rowOf(contributor: CheckedContributor, finding: number, pooled: Row): Row {
-  return pooled.map((cell, column) => cellOf(contributor, finding, column, cell.length) ?? cell);
+export function rowOf(contributor: CheckedContributor, finding: CheckedFinding, pooled: Row): Row {
+  return pooled.map((cell, column) => cellOf(contributor, finding, column) ?? cell);
 }
 
 /** The panel as one contributor sees it; rows that are unjudged in the pool stay out. */
-export function ownView(contributor: CheckedContributor, pooled: View): View {
+export function ownView(panel: CheckedPanel, contributor: CheckedContributor, pooled: View): View {
   return {
     prior: contributor.prior ?? pooled.prior,
-    rows: pooled.rows.map((row, finding) => row && rowOf(contributor, finding, row)),
+    rows: pooled.rows.map((row, finding) => row && rowOf(contributor, at(panel.findings, finding), row)),
   };
 }

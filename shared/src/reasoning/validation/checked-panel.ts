@@ -12,6 +12,8 @@ export interface CheckedPanel {
   /** Overlap of each group. */
   overlaps: readonly number[];
   findings: readonly CheckedFinding[];
+  /** Length of the list that holds all cells of a view: the sum of columns × levels over the findings. */
+  cellCount: number;
   contributors: readonly CheckedContributor[];
 }
 
@@ -31,22 +33,22 @@ export interface CheckedFinding {
   cost: number;
   waitDays: number;
   burden: number;
+  /** Where its cells begin in a list of all cells: columns × levels of them, one column after the other. */
+  start: number;
 }
 
 export interface CheckedContributor {
   id: string;
   weight: number;
   prior: readonly number[] | null;
-  /** For each finding; null where the contributor left the whole row blank. */
-  judgements: readonly (Judgement | null)[];
-}
-
-export interface Judgement {
-  /** 0.25, 0.5 or 1. */
-  exposure: number;
   /**
-   * columns × levels, one column after the other. A column left blank is all
-   * zeros: a judged share is never below 0.001, so a zero cannot be mistaken.
+   * For each finding 0.25, 0.5 or 1 by how often the contributor meets it, and
+   * 0 where the whole row was left blank.
+   */
+  exposures: Float64Array;
+  /**
+   * All cells, where the findings say. A column left blank is all zeros: a
+   * judged share is never below 0.001, so a zero cannot be mistaken for one.
    */
   cells: Float64Array;
 }

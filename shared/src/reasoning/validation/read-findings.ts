@@ -6,23 +6,27 @@ import { idsOf, readIds, readIndex, readNumber, readObject } from './read-values
 export interface ReadFindings {
   findings: CheckedFinding[];
   positions: ReadonlyMap<string, number>;
+  /** Length of a list that holds the cells of all of them. */
+  cellCount: number;
 }
 
-/** Reads the findings; `groups` holds the position of each group id. */
+/** Reads the findings; `groups` holds the position of each group id. Their cells are laid out one after the other. */
 export function readFindings(
   list: readonly unknown[],
+  columns: number,
   groups: ReadonlyMap<string, number>,
   faults: Faults,
 ): ReadFindings {
   if (list.length > limits.findings) faults.add('findings', `must be at most ${limits.findings}`);
   const entries = list.map((entry, index) => readObject(entry, `findings[${index}]`, faults));
   const positions = readIds(idsOf(entries), (index) => `findings[${index}].id`, faults);
+  let start = 0;
   const findings = entries.map((entry, index): CheckedFinding => {
     const at = `findings[${index}]`;
     const fields = entry ?? {};
     const levels =
       fields.levels === undefined ? 2 : readIndex(fields.levels, 2, limits.levels, `${at}.levels`, faults);
-    return {
+    const finding = {
       id: typeof fields.id === 'string' ? fields.id : '',
       levels: levels < 0 ? 2 : levels,
       observed: readObserved(fields.observed, levels, `${at}.observed`, faults),
@@ -31,9 +35,12 @@ export function readFindings(
       cost: readNumber(fields.cost ?? undefined, 0, Number.MAX_VALUE, 0, `${at}.cost`, faults),
       waitDays: readNumber(fields.waitDays ?? undefined, 0, Number.MAX_VALUE, 0, `${at}.waitDays`, faults),
       burden: readNumber(fields.burden ?? undefined, 0, limits.burden, 0, `${at}.burden`, faults),
+      start,
     };
+    start += columns * finding.levels;
+    return finding;
   });
-  return { findings, positions };
+  return { findings, positions, cellCount: start };
 }
 
 function readObserved(value: unknown, levels: number, path: string, faults: Faults): number | null {

@@ -25,18 +25,19 @@ export function readPanel(input: unknown): CheckedPanel {
   const tempering = readNumber(fields.tempering, limits.smallestTempering, 1, 1, 'tempering', faults);
   const pairs = known ? readPairs(readList(fields.together, 'together', faults), candidates, faults) : [];
   const groups = readGroups(readList(fields.groups, 'groups', faults), faults);
-  const { findings, positions } = readFindings(
+  const { findings, positions, cellCount } = readFindings(
     readList(fields.findings, 'findings', faults),
+    columns,
     groups.positions,
     faults,
   );
-  const contributors = readContributors(
-    known ? readList(fields.contributors, 'contributors', faults) : [],
+  const contributors = readContributors(known ? readList(fields.contributors, 'contributors', faults) : [], {
     columns,
     findings,
+    cellCount,
     positions,
     faults,
-  );
+  });
   if (faults.found.length > 0) throw new PanelRefused(faults.found);
   return {
     candidates,
@@ -46,6 +47,7 @@ export function readPanel(input: unknown): CheckedPanel {
     pairs,
     overlaps: groups.overlaps,
     findings,
+    cellCount,
     contributors,
   };
 }
