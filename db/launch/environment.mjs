@@ -81,8 +81,6 @@ export function serverEnvironment(settings, { env, secrets, services }) {
     PUBLIC_URL: settings.publicUrl,
     DATA_DIR: settings.dataDirectory,
     DEMO: settings.demo ? '1' : '0',
-    TIME_ZONE: env['TIME_ZONE'] || 'UTC',
-    MAIL_FROM: env['MAIL_FROM'] || 'Weighhouse <weighhouse@localhost>',
     ...secrets,
     ...services,
   };

@@ -80,7 +80,6 @@ describe('the environment of the server', () => {
       PORT: '4180',
       PUBLIC_URL: 'http://localhost:4180',
       DEMO: '1',
-      TIME_ZONE: 'UTC',
       DATABASE_URL: 'mysql://started',
       S3_ENDPOINT: 'http://started',
       SMTP_URL: 'smtp://started',

@@ -1,4 +1,5 @@
-import { existsSync, readFileSync } from 'node:fs';
+import { createHash } from 'node:crypto';
+import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { isRoot } from './account.mjs';
 import { LaunchFault } from './fault.mjs';
 import { inProject } from './paths.mjs';
@@ -52,8 +53,21 @@ export async function requirePrograms(wanted, { processes, say, root = isRoot(),
 }
 
 /**
- * Whether node_modules holds what package-lock.json names. Times say little after a clone or a copy, so the
- * list that npm keeps inside node_modules is compared with the lock file.
+ * Where an installation from the lock file says which one it was.
+ *
+ * @param {string} root
+ */
+const installedFrom = (root) => `${root}/node_modules/.installed-from`;
+
+/** @param {string} root */
+const lockDigest = (root) =>
+  createHash('sha256')
+    .update(readFileSync(`${root}/package-lock.json`))
+    .digest('hex');
+
+/**
+ * Whether node_modules holds what package-lock.json names. Times say little after a clone or a copy, so it
+ * counts what was installed from, and where a person installed by hand, the list that npm keeps.
  *
  * @param {string} [root] the project's folder
  * @returns {boolean}
@@ -61,6 +75,8 @@ export async function requirePrograms(wanted, { processes, say, root = isRoot(),
 export function modulesMatchLock(root = inProject()) {
   const installedFile = `${root}/node_modules/.package-lock.json`;
   if (!existsSync(installedFile)) return false;
+  const from = installedFrom(root);
+  if (existsSync(from) && readFileSync(from, 'utf8') === lockDigest(root)) return true;
   const wanted = JSON.parse(readFileSync(`${root}/package-lock.json`, 'utf8')).packages;
   const installed = JSON.parse(readFileSync(installedFile, 'utf8')).packages;
   return Object.entries(wanted).every(([folder, { version, optional, devOptional }]) => {
@@ -69,6 +85,15 @@ export function modulesMatchLock(root = inProject()) {
     if (installed[folder] === undefined) return optional === true || devOptional === true;
     return installed[folder].version === version;
   });
+}
+
+/**
+ * Marks node_modules as installed from the lock file as it is now.
+ *
+ * @param {string} [root]
+ */
+export function markInstalled(root = inProject()) {
+  writeFileSync(installedFrom(root), lockDigest(root));
 }
 
 /**
@@ -82,4 +107,5 @@ export async function requireModules({ processes, say }) {
   if (npm === null) throw new LaunchFault('The program npm is missing. It comes with Node 20.');
   const code = await processes.run({ name: 'npm ci', program: npm, args: ['ci', '--no-audit', '--no-fund'] });
   if (code !== 0) throw new LaunchFault('npm ci failed. Its output above says why.');
+  markInstalled();
 }

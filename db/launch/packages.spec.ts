@@ -2,7 +2,7 @@ import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
-import { modulesMatchLock, requirePrograms } from './packages.mjs';
+import { markInstalled, modulesMatchLock, requirePrograms } from './packages.mjs';
 import { createProcesses, type Command } from './processes.mjs';
 
 function pretend({ installed, aptWorks = true }: { installed: string[]; aptWorks?: boolean }) {
@@ -85,6 +85,15 @@ describe('the packages in node_modules', () => {
     write('package-lock.json', wanted);
     write('node_modules/.package-lock.json', { 'node_modules/a': { version: '1.0.0' } });
     expect(modulesMatchLock(root)).toBe(true);
+  });
+
+  it('match what was installed from the lock file, also when npm left an unneeded entry of it out', () => {
+    write('package-lock.json', wanted);
+    write('node_modules/.package-lock.json', {});
+    markInstalled(root);
+    expect(modulesMatchLock(root)).toBe(true);
+    write('package-lock.json', { ...wanted, 'node_modules/b': { version: '2.0.0' } });
+    expect(modulesMatchLock(root)).toBe(false);
   });
 
   it.each([

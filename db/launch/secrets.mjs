@@ -40,8 +40,8 @@ export function keptSecret(folder, name, make) {
 /** 256 random bits in letters, digits, - and _, which need no quoting in SQL or a URL. */
 export const randomText = () => randomBytes(32).toString('base64url');
 
-/** A key for AES-256 in base64. */
-const randomKey = () => randomBytes(32).toString('base64');
+/** A key of 256 bits in hexadecimal digits. */
+const randomKey = () => randomBytes(32).toString('hex');
 
 /**
  * The server's secrets: from the environment, or made once for the demo. A real installation must bring its
@@ -59,7 +59,7 @@ export function serverSecrets(folder, { demo, env }) {
     .map(([name]) => name);
   if (!demo && missing.length > 0) {
     throw new LaunchFault(
-      `Outside the demo (DEMO=0), set ${missing.join(' and ')} to a random value that you keep, for instance made by\n  openssl rand -base64 32`,
+      `Outside the demo (DEMO=0), set ${missing.join(' and ')} to a random value that you keep, for instance made by\n  openssl rand -hex 32`,
     );
   }
   return {
