@@ -43,6 +43,18 @@ export class PlanReader {
     return (await this.signed(caseId, em)).at(-1) ?? null;
   }
 
+  /** Number and moment of the plan signed last, of several cases; those without one are left out. */
+  async lastSignedOf(caseIds: readonly string[]): Promise<Map<string, { number: number; signedAt: Date }>> {
+    if (caseIds.length === 0) return new Map();
+    const rows = await this.source.manager.find(PlanRow, {
+      where: { caseId: In([...caseIds]), signedAt: Not(IsNull()) },
+      order: { number: 'ASC' },
+    });
+    return new Map(
+      rows.map(({ caseId, number, signedAt }) => [caseId, { number, signedAt: signedAt ?? new Date(0) }]),
+    );
+  }
+
   /** How many plans of a case are signed. */
   async signedCount(caseId: string, em: EntityManager): Promise<number> {
     return em.countBy(PlanRow, { caseId, signedAt: Not(IsNull()) });

@@ -43,7 +43,17 @@ export const summarySchema = z
     body: z.string(),
     planNumber: z.int().nullable(),
     safetyNet: z.string().nullable(),
-    actions: z.array(z.object({ what: z.string(), due: daySchema.nullable() })),
+    /** Those that concern the patient, and those that the reader owns. */
+    actions: z.array(
+      z.object({
+        id: idSchema.optional(),
+        what: z.string(),
+        due: daySchema.nullable(),
+        /** The reader owns it and reports it done. */
+        mine: z.boolean().optional(),
+        doneAt: momentSchema.nullable().optional(),
+      }),
+    ),
     /** What the chair asks to be changed. */
     returnedWords: z.string().nullable(),
     approvedBy: z.string().nullable(),

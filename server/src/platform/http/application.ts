@@ -8,6 +8,7 @@ import express, { type NextFunction, type Request, type Response } from 'express
 import helmet from 'helmet';
 import { pinoHttp } from 'pino-http';
 import { type Configuration, CONFIGURATION } from '../config/configuration.js';
+import { NullAsJson } from './null-as-json.js';
 import { setUpOpenApi } from './open-api.js';
 import { refuseForeignRequests } from './foreign-requests.js';
 import { validationPipe } from './validation.js';
@@ -25,7 +26,7 @@ export function configureApplication(app: NestExpressApplication): void {
     next();
   });
   app.useGlobalPipes(validationPipe());
-  app.useGlobalInterceptors(new StandardSchemaSerializerInterceptor(app.get(Reflector)));
+  app.useGlobalInterceptors(new NullAsJson(), new StandardSchemaSerializerInterceptor(app.get(Reflector)));
   app.useBodyParser('json', { limit: '1mb' });
   app.enableShutdownHooks();
   setUpOpenApi(app);
