@@ -1,5 +1,4 @@
-import type { JudgedValue, SavedVersion } from '../judgements/saved-version.js';
-import { priorTarget } from '../judgements/saved-version.js';
+import { type JudgedValue, priorTarget, type SavedVersion } from '../judgements/saved-version.js';
 
 /** Small saved versions for the specs; each test says only what it is about. */
 export function makeVersion(parts: Partial<SavedVersion> = {}): SavedVersion {
