@@ -1,6 +1,7 @@
 import { Button, TextArea, TextField } from '@radix-ui/themes';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
 import { type OutcomeInput, outcomeInputSchema } from '@weighhouse/shared/contracts/outcomes';
+import { z } from 'zod';
 import { type SubmitEvent, useState } from 'react';
 import { ConfirmDialog } from '../../../components/confirm-dialog';
 import { ErrorSummary } from '../../../components/error-summary';
@@ -11,7 +12,7 @@ import { isApiError } from '../../../lib/api';
 import { useFormat } from '../../../lib/use-format';
 import { useDifferential } from '../../differential/api/get-differential';
 import { useRecordOutcome } from '../api/record-outcome';
-import { useOutcomeText } from './use-outcome-text';
+import { useKept } from '../../../lib/use-kept';
 
 const labels = {
   candidateId: 'Which candidate it was',
@@ -20,13 +21,21 @@ const labels = {
   knownOn: 'Known since',
 };
 const none = 'none';
+const textSchema = z.object({
+  /** A candidate's id, `none`, or empty while nothing is chosen. */
+  candidate: z.string(),
+  diagnosis: z.string(),
+  howKnown: z.string(),
+  knownOn: z.string(),
+});
+const empty = { candidate: '', diagnosis: '', howKnown: '', knownOn: '' };
 
 /** Records the outcome, after a question, because it stands for good. */
 export function OutcomeForm({ caseId, onClose }: { caseId: string; onClose: () => void }) {
   const differential = useDifferential(caseId);
   const record = useRecordOutcome(caseId);
   const format = useFormat();
-  const [typed, setTyped, clear] = useOutcomeText(caseId);
+  const [typed, setTyped, clear] = useKept(`outcome.${caseId}`, textSchema, empty);
   const [faults, setFaults] = useState<FieldFault[]>([]);
   const [asking, setAsking] = useState(false);
   const candidates = (differential.data?.candidates ?? []).filter((one) => !one.retired);

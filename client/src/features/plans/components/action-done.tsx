@@ -1,12 +1,13 @@
 import { Button, TextArea } from '@radix-ui/themes';
 import { type Plan, actionDoneSchema } from '@weighhouse/shared/contracts/plans';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
+import { z } from 'zod';
 import { type SubmitEvent, useState } from 'react';
 import { FailureLine } from '../../../components/failure';
 import { faultsIn } from '../../../components/faults';
 import { FormField } from '../../../components/form-field';
 import { useReportAction } from '../api/report-action';
-import { useKeptText } from '../../../lib/use-kept-text';
+import { useKept } from '../../../lib/use-kept';
 
 interface Props {
   caseId: string;
@@ -16,7 +17,7 @@ interface Props {
 
 /** The owner's report: what was done and what came of it. */
 export function ActionDone({ caseId, action, onClose }: Props) {
-  const [words, setWords, clear] = useKeptText(`action.${action.id}`);
+  const [words, setWords, clear] = useKept(`action.${action.id}`, z.string(), '');
   const [faults, setFaults] = useState<FieldFault[]>([]);
   const report = useReportAction(caseId, action.id);
   const path = `done-${action.id}`;

@@ -1,13 +1,14 @@
 import { Button, TextArea } from '@radix-ui/themes';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
 import { dissentSchema, type Plan } from '@weighhouse/shared/contracts/plans';
+import { z } from 'zod';
 import { type SubmitEvent, useState } from 'react';
 import { FailureLine } from '../../../components/failure';
 import { faultsIn } from '../../../components/faults';
 import { FormField } from '../../../components/form-field';
 import { useFormat } from '../../../lib/use-format';
 import { useGiveStance } from '../api/give-stance';
-import { useKeptText } from '../../../lib/use-kept-text';
+import { useKept } from '../../../lib/use-kept';
 
 interface Props {
   caseId: string;
@@ -93,7 +94,7 @@ interface DissentProps {
 }
 
 function DissentForm({ planId, before, give, onClose }: DissentProps) {
-  const [words, setWords, clear] = useKeptText(`dissent.${planId}`);
+  const [words, setWords, clear] = useKept(`dissent.${planId}`, z.string(), '');
   const [faults, setFaults] = useState<FieldFault[]>([]);
   const [touched, setTouched] = useState(false);
   const text = touched || words !== '' ? words : before;
