@@ -1,0 +1,25 @@
+import type { EntityManager, SelectQueryBuilder } from 'typeorm';
+import { AuditEntry } from '../platform/audit-log/audit-entry.entity.js';
+
+export interface TrailQuestion {
+  caseId: string;
+  /** Who asks. */
+  actorId: string;
+  ownOnly: boolean;
+  /** Rounds of which nobody may see what others did. */
+  sealedRoundIds: readonly string[];
+}
+
+/** The lines of a case's trail that one person may see, the latest first. */
+export function trailLines(em: EntityManager, question: TrailQuestion): SelectQueryBuilder<AuditEntry> {
+  const lines = em
+    .createQueryBuilder(AuditEntry, 'line')
+    .where('line.caseId = :caseId', { caseId: question.caseId })
+    .orderBy('line.id', 'DESC');
+  if (question.ownOnly) return lines.andWhere('line.actorId = :me', { me: question.actorId });
+  if (question.sealedRoundIds.length === 0) return lines;
+  return lines.andWhere(
+    '(line.sealedRoundId IS NULL OR line.sealedRoundId NOT IN (:...sealed) OR line.actorId = :me)',
+    { sealed: question.sealedRoundIds, me: question.actorId },
+  );
+}
