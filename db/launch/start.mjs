@@ -3,10 +3,11 @@ import { client, code, requireBuilt } from './build.mjs';
 import { startDevelopment } from './development.mjs';
 import { readSettings, serverEnvironment } from './environment.mjs';
 import { describeError, LaunchFault } from './fault.mjs';
-import { beginLaunch, runBuilt } from './launch.mjs';
+import { beginLaunch } from './launch.mjs';
 import { requireModules, requirePrograms } from './packages.mjs';
 import { dataPaths, inProject } from './paths.mjs';
 import { requireFreePort } from './ports.mjs';
+import { prepareDatabase } from './prepare.mjs';
 import { isReady } from './readiness.mjs';
 import { serverSecrets } from './secrets.mjs';
 import { startServices } from './services.mjs';
@@ -34,9 +35,7 @@ async function bringUp(settings, { processes, record }) {
   ]);
   record.setServices(services);
   const env = serverEnvironment(settings, { env: process.env, secrets, services });
-  const commands = { processes, env, dataDirectory };
-  await runBuilt({ what: 'Migrating the database', file: 'db/dist/migrate.js', ...commands });
-  if (settings.demo) await runBuilt({ what: 'Seeding the demo', file: 'db/dist/seed-demo.js', ...commands });
+  await prepareDatabase(settings, { processes, env });
   if (settings.dev) return startDevelopment({ settings, processes, env });
   const server = processes.start({
     name: 'The server',
