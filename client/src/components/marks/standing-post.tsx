@@ -21,6 +21,7 @@ const at = (share: number) => ({ bottom: `${String(barPlace(share))}%` });
 export function StandingPost({ share, range, before, ticks, own, none, sealed }: StandingPostProps) {
   return (
     <span className="mark-post" data-sealed={sealed || undefined} aria-hidden="true">
+      {sealed && <span className="mark-post-word">sealed</span>}
       {share !== null && (
         <span
           className="mark-post-bar"

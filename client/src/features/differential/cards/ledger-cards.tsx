@@ -6,6 +6,7 @@ import { useFormat } from '../../../lib/use-format';
 import { useLedger } from '../ledger/ledger-context';
 import { MovingFigure } from '../ledger/moving-figure';
 import { columnLabel } from '../model/columns';
+import { dayWords } from '../model/day-words';
 import { findingLine } from '../model/finding-words';
 import { priorSentence, priorView } from '../model/prior-view';
 import { rowGroups } from '../model/rows';
@@ -59,7 +60,7 @@ function FindingCard({ finding }: { finding: Finding }) {
       <p className="small soft">{group?.title}</p>
       <h2 className="ledger-name">{finding.title}</h2>
       <p className="small soft">
-        {findingLine(finding, format.date)}
+        {findingLine(finding, dayWords(format))}
         {unsaved.has(finding.id) && <b className="ledger-unsaved">Typed, not saved</b>}
       </p>
       <CellList finding={finding} />

@@ -57,7 +57,7 @@ export function PriorForm({ onSaved }: { onSaved?: () => void }) {
           );
         })}
       </div>
-      <p id={`${id}rest`} className="prior-rest figures" data-over={prior.shares.rest < 0 || undefined} role="status">
+      <p id={`${id}rest`} className="prior-rest" data-over={prior.shares.rest < 0 || undefined} role="status">
         {restWords(prior.shares)}
       </p>
       <label className="reason-label" htmlFor={`${id}reason`}>

@@ -1,6 +1,7 @@
 import type { Finding } from '@weighhouse/shared/contracts/findings';
 import { memo } from 'react';
 import { useFormat } from '../../../lib/use-format';
+import { dayWords } from '../model/day-words';
 import { findingLine } from '../model/finding-words';
 import { FindingCell } from './finding-cell';
 import { useLedger } from './ledger-context';
@@ -17,7 +18,7 @@ export const FindingRow = memo(function FindingRow({ finding, row }: { finding: 
       <th scope="row" className="ledger-title" data-row={row} data-column={0} tabIndex={-1}>
         <span className="ledger-name">{finding.title}</span>
         <span className="ledger-line">
-          {findingLine(finding, format.date)}
+          {findingLine(finding, dayWords(format))}
           {unsaved.has(finding.id) && <b className="ledger-unsaved">Typed, not saved</b>}
         </span>
       </th>

@@ -10,11 +10,9 @@ export function HeaderRow() {
       </th>
       {columns.map((column) => (
         <th key={column.id} scope="col" className="ledger-candidate" title={column.name}>
-          <span className="ledger-letter">
-            {column.letter}
-            {column.mustNotMiss && <span className="ledger-must"> must not miss</span>}
-          </span>
+          <span className="ledger-letter">{column.letter}</span>
           <span className="ledger-candidate-name">{column.short}</span>
+          {column.mustNotMiss && <span className="ledger-must">must not miss</span>}
         </th>
       ))}
     </tr>

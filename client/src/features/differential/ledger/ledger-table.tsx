@@ -8,12 +8,21 @@ import { KeysDialog } from './keys-dialog';
 import { type TypeAt, useLedger } from './ledger-context';
 import { PriorRow } from './prior-row';
 import { StandingRow } from './standing-row';
+import { useFrameHeight } from './use-frame-height';
 import { useWidth } from './use-width';
 
 /** Pixels: the title column, and what a column of figures needs at least. */
 const titleWidth = 308;
-const narrowTitleWidth = 220;
+const narrowTitleWidth = 280;
+const leastTitleWidth = 200;
+const goodColumnWidth = 92;
 const leastColumnWidth = 92;
+
+/** The titles give way to the figures where it is narrow. */
+function titleFor(width: number, columns: number): number {
+  if (width < 800) return leastTitleWidth;
+  return (width - titleWidth) / columns < goodColumnWidth ? narrowTitleWidth : titleWidth;
+}
 
 /** The ledger as a grid: the prior, the findings, and where the panel stands. */
 export function LedgerTable({ compact }: { compact: boolean }) {
@@ -21,8 +30,10 @@ export function LedgerTable({ compact }: { compact: boolean }) {
   const [keysOpen, setKeysOpen] = useState(false);
   const [frame, width] = useWidth<HTMLDivElement>();
   const standingRow = rows.length + 1;
-  const title = width < 900 ? narrowTitleWidth : titleWidth;
+  const title = titleFor(width, columns.length);
   const scrolls = width > 0 && title + columns.length * leastColumnWidth > width;
+
+  useFrameHeight(frame, scrolls);
 
   const openAt = (place: Place, at: TypeAt | null) => {
     if (place.row === 0) open(canJudge ? { kind: 'prior', at } : { kind: 'why', target: 'prior', column: place.column - 1 });
@@ -68,7 +79,12 @@ export function LedgerTable({ compact }: { compact: boolean }) {
       className="ledger-frame"
       data-scrolls={scrolls || undefined}
       data-compact={compact || undefined}
-      style={{ '--title-width': `${String(title)}px`, '--least-width': `${String(leastColumnWidth)}px` } as CSSProperties}
+      style={
+        {
+          '--title-width': `${String(title)}px`,
+          '--least-table': `${String(title + columns.length * leastColumnWidth)}px`,
+        } as CSSProperties
+      }
     >
       <table className="ledger" role="grid" aria-label="The differential" {...grid.tableProps}>
         <colgroup>

@@ -31,9 +31,14 @@ function StandingCell({ column, row }: { column: Column; row: number }) {
   return (
     <td className="ledger-cell" data-row={row} data-column={column.index + 1} tabIndex={-1}>
       <StandingPost {...view} none={column.none} />
-      <span className="standing-big figures">
-        {view.share === null ? (view.sealed ? 'sealed' : '–') : <MovingFigure share={view.share} percent />}
-      </span>
+      {view.share !== null && (
+        <span
+          className="standing-big figures"
+          data-words={typeof naturalFrequency(view.share).outOf100 === 'string' || undefined}
+        >
+          <MovingFigure share={view.share} percent />
+        </span>
+      )}
       <span className="standing-like">
         {view.share !== null && `${naturalFrequency(view.share).words} like this`}
         {view.share === null && view.own !== null && `you: ${naturalFrequency(view.own).words}`}

@@ -37,3 +37,12 @@ export function unsealHindrance({ in: inNow, quorum, deadlinePast }: RoundCount,
   if (!deadlinePast) return `Unsealing needs ${missing} handed in, or the deadline past and two in.`;
   return 'The deadline is past, but fewer than two have handed in.';
 }
+
+/** What the round means for whoever looks at its numbers. */
+export function roundSentence(round: Round): string {
+  const name = `Round ${String(round.number)}`;
+  if (round.state === 'closed') return `${name} is closed: nobody judges at the moment.`;
+  if (round.state === 'unsealed') return `${name} is unsealed: everybody sees all numbers.`;
+  if (round.kind === 'sealed') return `${name} is sealed: nobody sees anyone else’s numbers, nor the pool.`;
+  return `${name} is live: every saved judgement moves the pool at once.`;
+}

@@ -6,6 +6,7 @@ import { ApartNote } from '../editor/apart-note';
 import { RowEditor } from '../editor/row-editor';
 import { EnteredInErrorButton } from '../../findings/components/entered-in-error-button';
 import { useLedger } from '../ledger/ledger-context';
+import { dayWords } from '../model/day-words';
 import { effortWords, reliabilityWord, sourceWords, stateWords } from '../model/finding-words';
 import { CellList } from './cell-list';
 import { SideHeading } from './side-panel';
@@ -71,14 +72,14 @@ function About({ finding }: { finding: Finding }) {
         {finding.observed === null || finding.enteredInError
           ? `${stateWords(finding)}.`
           : `${stateWords(finding)} in this patient.`}
-        {from !== null && (to === null || source?.text ? ` From ${from}.` : '')}
+        {from !== null && (to === null || source?.text) ? ` ${from}.` : ''}
         {to !== null && report !== null && (
           <>
             {' '}
             From <Link to={to}>{report}</Link>.
           </>
         )}
-        {finding.observedOn !== null && ` ${format.date(finding.observedOn)}.`}
+        {finding.observedOn !== null && ` ${dayWords(format)(finding.observedOn)}.`}
         {finding.reliability < 0.995 && ` The report of it is ${reliabilityWord(finding.reliability)}.`}
         {group && ` Overlaps with the group “${group.label}”.`}
         {effortWords(finding).length > 0 && ` To find out: ${effortWords(finding).join(', ')}.`}

@@ -3,7 +3,7 @@ import { type ReactNode, useState } from 'react';
 import { useFormat } from '../../../lib/use-format';
 import { useNow } from './use-now';
 import { useLedger } from '../ledger/ledger-context';
-import { roundCount, roundTitle, unsealHindrance } from '../model/round-words';
+import { roundCount, roundSentence, unsealHindrance } from '../model/round-words';
 import { CloseRoundDialog } from './close-round-dialog';
 import { HandInDialog } from './hand-in-dialog';
 import { OpenRoundDialog } from './open-round-dialog';
@@ -48,7 +48,7 @@ export function RoundBar({ children }: { children?: ReactNode }) {
             open({ kind: 'pooled' });
           }}
         >
-          How it was pooled
+          {differential.assessment ? 'How it was pooled' : 'How it is pooled'}
         </Button>
         {round && openNow && may('round.close') && button('close', 'Close the round', false)}
         {round && openNow && round.kind === 'sealed' && may('round.unseal') && button('unseal', 'Unseal', count?.quorumIn === true)}
@@ -70,16 +70,18 @@ export function RoundBar({ children }: { children?: ReactNode }) {
   );
 }
 
+/** What the case's header does not say: until when, whose numbers these are, and one's own hand-in. */
 function RoundLine() {
   const { differential } = useLedger();
   const format = useFormat();
   const now = useNow();
-  const { round, settings, mine, sealed, assessment, shownRound } = differential;
+  const { round, mine, sealed, assessment, shownRound } = differential;
   if (!round) return <>No round is open yet.</>;
-  const count = roundCount(round, settings.quorum, now);
-  const parts = [`${roundTitle(round)}. ${String(count.in)} of ${String(count.of)} in.`];
-  if (round.state === 'open' && round.deadline !== null)
-    parts.push(count.deadlinePast ? `The deadline was ${format.moment(round.deadline)}.` : `Hand in by ${format.moment(round.deadline)}.`);
+  const parts = [roundSentence(round)];
+  if (round.state === 'open' && round.deadline !== null) {
+    const past = new Date(round.deadline) <= now;
+    parts.push(past ? `The deadline was ${format.moment(round.deadline)}.` : `Hand in by ${format.moment(round.deadline)}.`);
+  }
   if (mine?.handedInAt) parts.push(`You handed in ${format.moment(mine.handedInAt)}.`);
   if (sealed && assessment && shownRound) parts.push(`The numbers below are those of round ${String(shownRound.number)}.`);
   return <>{parts.join(' ')}</>;
