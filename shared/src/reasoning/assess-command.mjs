@@ -1,27 +1,4 @@
-/**
- * Starts the assess command, building the shared workspace first when it is
- * missing or older than its source. Plain JavaScript, so that it runs from a
- * fresh clone; nothing but the answer goes to standard output.
- */
-import { spawnSync } from 'node:child_process';
-import { existsSync, readdirSync, statSync } from 'node:fs';
-import { createRequire } from 'node:module';
-import { fileURLToPath } from 'node:url';
+/** `npm run assess`: a panel as JSON from standard input, its assessment as JSON to standard output. */
+import { importBuilt } from './built.mjs';
 
-const workspace = new URL('../../', import.meta.url);
-const built = new URL('dist/reasoning/command.js', workspace);
-const stamp = new URL('dist/.tsbuildinfo', workspace);
-
-function newestSource() {
-  const folder = new URL('src/', workspace);
-  const sources = readdirSync(folder, { recursive: true }).filter((name) => name.endsWith('.ts'));
-  return Math.max(...sources.map((name) => statSync(new URL(name, folder)).mtimeMs));
-}
-
-if (!existsSync(built) || !existsSync(stamp) || statSync(stamp).mtimeMs < newestSource()) {
-  const compiler = createRequire(import.meta.url).resolve('typescript/bin/tsc');
-  const build = spawnSync(process.execPath, [compiler, '-b', fileURLToPath(workspace)], { encoding: 'utf8' });
-  if (build.status !== 0) process.stderr.write(build.stdout + build.stderr);
-}
-
-await import(built.href);
+await importBuilt('reasoning/command.js');

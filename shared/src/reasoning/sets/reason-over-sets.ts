@@ -23,12 +23,14 @@ export function reasonOverSets(
   const { table } = assumption;
   const prior = setPrior(assumption, view.prior);
   const before = priorLogs(assumption, prior);
+  /** Working space, reused by every computation over all sets. */
+  const product = new Float64Array(table.size);
   /** For each group Σ ln P' over its rows, without the exponent; the rows without a group are at -1. */
   const groupLogs = new Map<number, Float64Array>();
   const evidence = new Float64Array(table.size);
   for (const [group, { exponent, rows }] of classesByGroup(panel, view, exponents.rows)) {
     const logs = new Float64Array(table.size);
-    addRowLogs(panel, table, view, rows, 1, logs);
+    addRowLogs(panel, table, view, rows, 1, logs, product);
     for (let p = 0; p < logs.length; p += 1) evidence[p]! += exponent * logs[p]!;
     if (group >= 0) groupLogs.set(group, logs);
   }
@@ -51,7 +53,7 @@ export function reasonOverSets(
     standingOf(other, otherExponents) {
       const logs = priorLogs(assumption, setPrior(assumption, other.prior));
       for (const { exponent, rows } of classesByExponent(panel, other, otherExponents.rows)) {
-        addRowLogs(panel, table, other, rows, exponent, logs);
+        addRowLogs(panel, table, other, rows, exponent, logs, product);
       }
       return standingIn(normaliseLogs(logs));
     },

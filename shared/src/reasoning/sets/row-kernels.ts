@@ -5,8 +5,8 @@ import type { TwoLevelTable } from './two-level-table.js';
 
 /*
  * The inner loops: one value per set, nothing allocated, no call inside. Two
- * rows of two levels go through memory together, and three levels, which are
- * the common case of more than two, have a loop without an inner one.
+ * rows of two levels go through memory together, and three and four levels, the
+ * common cases of more than two, have loops without an inner one.
  */
 
 /** Multiplies each set's entry by P'(level | set) of every row. */
@@ -66,19 +66,9 @@ function multiplyByTwoRows(
 }
 
 function multiplyByMoreLevels(entries: Float64Array, list: SetList, table: MoreLevelTable): void {
-  if (table.others === 2) return multiplyByThreeLevels(entries, list, table);
-  const { starts, lows } = list;
-  const { others, reliability, mixed, low, high } = table;
-  for (let h = 0; h + 1 < starts.length; h += 1) {
-    const end = starts[h + 1]!;
-    const from = h * others;
-    for (let p = starts[h]!; p < end; p += 1) {
-      const place = lows[p]! * others;
-      let sum = 1;
-      for (let other = 0; other < others; other += 1) sum += low[place + other]! * high[from + other]!;
-      entries[p]! *= mixed + reliability / sum;
-    }
-  }
+  if (table.others === 2) multiplyByThreeLevels(entries, list, table);
+  else if (table.others === 3) multiplyByFourLevels(entries, list, table);
+  else multiplyByManyLevels(entries, list, table);
 }
 
 function multiplyByThreeLevels(
@@ -94,6 +84,35 @@ function multiplyByThreeLevels(
     for (let p = starts[h]!; p < end; p += 1) {
       const place = 2 * lows[p]!;
       entries[p]! *= mixed + reliability / (1 + f * low[place]! + s * low[place + 1]!);
+    }
+  }
+}
+
+function multiplyByFourLevels(entries: Float64Array, { starts, lows }: SetList, table: MoreLevelTable): void {
+  const { reliability, mixed, low, high } = table;
+  for (let h = 0; h + 1 < starts.length; h += 1) {
+    const end = starts[h + 1]!;
+    const f = high[3 * h]!;
+    const s = high[3 * h + 1]!;
+    const t = high[3 * h + 2]!;
+    for (let p = starts[h]!; p < end; p += 1) {
+      const place = 3 * lows[p]!;
+      const sum = 1 + f * low[place]! + s * low[place + 1]! + t * low[place + 2]!;
+      entries[p]! *= mixed + reliability / sum;
+    }
+  }
+}
+
+function multiplyByManyLevels(entries: Float64Array, { starts, lows }: SetList, table: MoreLevelTable): void {
+  const { others, reliability, mixed, low, high } = table;
+  for (let h = 0; h + 1 < starts.length; h += 1) {
+    const end = starts[h + 1]!;
+    const from = h * others;
+    for (let p = starts[h]!; p < end; p += 1) {
+      const place = lows[p]! * others;
+      let sum = 1;
+      for (let other = 0; other < others; other += 1) sum += low[place + other]! * high[from + other]!;
+      entries[p]! *= mixed + reliability / sum;
     }
   }
 }

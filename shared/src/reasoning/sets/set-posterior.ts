@@ -1,5 +1,6 @@
 import type { CheckedPanel } from '../validation/checked-panel.js';
 import type { View } from '../view.js';
+import { fastLog } from './fast-log.js';
 import { multiplyByRows } from './row-kernels.js';
 import { type RowTable, rowTable } from './row-table.js';
 import type { SetAssumption, SetPrior } from './set-prior.js';
@@ -26,6 +27,8 @@ export function priorLogs({ table, together }: SetAssumption, prior: SetPrior): 
  * Adds to each set's entry exponent × Σ ln P'(observed | set) over some rows.
  * The rows are multiplied first and turned into a logarithm once, or as often
  * as it takes for the product not to underflow.
+ *
+ * @param product scratch space, as long as there are sets
  */
 export function addRowLogs(
   panel: CheckedPanel,
@@ -34,14 +37,14 @@ export function addRowLogs(
   rows: readonly number[],
   exponent: number,
   sums: Float64Array,
+  product: Float64Array,
 ): void {
-  const product = new Float64Array(table.size);
   let waiting: RowTable[] = [];
   let lowest = 0;
   const enter = () => {
     product.fill(1);
     multiplyByRows(product, table, waiting);
-    for (let p = 0; p < product.length; p += 1) sums[p]! += exponent * Math.log(product[p]!);
+    for (let p = 0; p < product.length; p += 1) sums[p]! += exponent * fastLog(product[p]!);
     waiting = [];
     lowest = 0;
   };

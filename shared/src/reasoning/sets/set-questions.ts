@@ -2,12 +2,19 @@ import type { Exponents } from '../evidence/exponents.js';
 import type { Expectation, Reasoning } from '../reasoning.js';
 import type { CheckedPanel } from '../validation/checked-panel.js';
 import type { View } from '../view.js';
+import { fastLog } from './fast-log.js';
 import { FixedPower } from './fixed-power.js';
 import { marginals } from './marginals.js';
 import { writeRow } from './row-kernels.js';
 import { rowTable } from './row-table.js';
 import type { SetTable } from './set-table.js';
-import { type Support, allSets, harmless, significantSets } from './significant.js';
+import { type Support, allSets, significantSets } from './significant.js';
+
+/** The part of an answer that sets left aside may account for, far below the 1e-12 that is promised. */
+const harmless = 1e-13;
+
+/** What may be left aside at first, and when that was too much. */
+const budgets = [1e-16, 1e-20];
 
 export interface Answered {
   panel: CheckedPanel;
@@ -29,12 +36,11 @@ interface Bounded<Value> {
 /**
  * Questions about a posterior that is known: each divides a row out of it or
  * multiplies one in, over the significant sets. Where the sets left aside could
- * account for more than a harmless part of the answer, it is asked again of all.
+ * account for more than a harmless part of the answer, it is asked again of more.
  */
 export function questions(answered: Answered): Pick<Reasoning, 'withoutFinding' | 'swapped' | 'expectation'> {
   const { table, shares } = answered;
-  let significant: Support | null = null;
-  let all: Support | null = null;
+  const supports: Support[] = [];
   const powers = new Map<number, FixedPower>();
   const powerOf = (exponent: number): FixedPower => {
     const power = powers.get(exponent) ?? new FixedPower(exponent);
@@ -42,11 +48,12 @@ export function questions(answered: Answered): Pick<Reasoning, 'withoutFinding' 
     return power;
   };
   const ask = <Value>(question: (support: Support) => Bounded<Value>): Value => {
-    significant ??= significantSets(table, shares);
-    const { value, missed } = question(significant);
-    if (missed <= harmless) return value;
-    all ??= allSets(table, shares);
-    return question(all).value;
+    for (const [index, budget] of budgets.entries()) {
+      const support = (supports[index] ??= significantSets(table, shares, budget));
+      const { value, missed } = question(support);
+      if (missed <= harmless) return value;
+    }
+    return question((supports[budgets.length] ??= allSets(table, shares))).value;
   };
   return {
     withoutFinding: (finding) => ask((support) => withoutFinding(answered, support, powerOf, finding)),
@@ -168,7 +175,7 @@ function expectation(
       after[index] = raised;
       p += share * given;
       total += raised;
-      logs += raised * Math.log(given);
+      logs += raised * fastLog(given);
     }
     for (let index = 0; index < after.length; index += 1) after[index]! /= total;
     nats += p * ((exponent * logs) / total - Math.log(total));

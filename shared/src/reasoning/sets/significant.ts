@@ -1,14 +1,8 @@
 import type { SetList, SetTable } from './set-table.js';
 
-/** Sets with a smaller share of the posterior than this are left aside where that provably changes nothing. */
-const leastShare = 1e-24;
-
-/** Relative change that leaving sets aside may make, far below the 1e-12 that is promised. */
-export const harmless = 1e-14;
-
 /** The sets a question about the posterior is answered over. */
 export interface Support extends SetList {
-  /** Posterior of each set in the list. */
+  /** Posterior of each set in the list; the empty set is always the first. */
   shares: Float64Array;
   /** Where each set stands in the table. */
   positions: Int32Array;
@@ -16,42 +10,57 @@ export interface Support extends SetList {
   aside: number;
 }
 
-/** The sets whose share is worth counting. After a few findings they are a small part of all. */
-export function significantSets({ starts, lows, size }: SetTable, shares: Float64Array): Support {
+/**
+ * The sets that are left when the least probable ones are left aside, as many
+ * as together have no more than `budget` of the posterior. After some findings
+ * most sets are such that all of them together could not change a digit.
+ */
+export function significantSets(table: SetTable, shares: Float64Array, budget: number): Support {
+  const { starts, lows, size } = table;
+  const least = thresholdFor(shares, budget);
+  const keptStarts = new Int32Array(starts.length);
+  const keptLows = new Uint16Array(size);
+  const keptShares = new Float64Array(size);
   const positions = new Int32Array(size);
-  const kept: Support = {
-    starts: new Int32Array(starts.length),
-    lows: new Uint16Array(size),
-    size: 0,
-    shares: new Float64Array(size),
-    positions,
-    aside: 0,
-  };
+  let aside = 0;
   let count = 0;
   for (let h = 0; h + 1 < starts.length; h += 1) {
     for (let p = starts[h]!; p < starts[h + 1]!; p += 1) {
-      // The empty set always stays, so that it can be found at the first place.
-      if (shares[p]! < leastShare && p > 0) {
-        kept.aside += shares[p]!;
+      if (shares[p]! < least && p > 0) {
+        aside += shares[p]!;
         continue;
       }
-      kept.lows[count] = lows[p]!;
-      kept.shares[count] = shares[p]!;
+      keptLows[count] = lows[p]!;
+      keptShares[count] = shares[p]!;
       positions[count] = p;
       count += 1;
     }
-    kept.starts[h + 1] = count;
+    keptStarts[h + 1] = count;
   }
   return {
-    ...kept,
+    starts: keptStarts,
+    lows: keptLows.subarray(0, count),
     size: count,
-    lows: kept.lows.subarray(0, count),
-    shares: kept.shares.subarray(0, count),
+    shares: keptShares.subarray(0, count),
     positions: positions.subarray(0, count),
+    aside,
   };
 }
 
 /** All sets, for the rare question that the significant ones cannot answer. */
 export function allSets({ starts, lows, size }: SetTable, shares: Float64Array): Support {
   return { starts, lows, size, shares, positions: Int32Array.from({ length: size }, (_, p) => p), aside: 0 };
+}
+
+/** A share such that all smaller ones sum to at most the budget, within a factor of 2 of the largest such. */
+function thresholdFor(shares: Float64Array, budget: number): number {
+  let threshold = budget / shares.length;
+  while (threshold < 1 && sumBelow(shares, 2 * threshold) <= budget) threshold *= 2;
+  return threshold;
+}
+
+function sumBelow(shares: Float64Array, threshold: number): number {
+  let sum = 0;
+  for (let p = 0; p < shares.length; p += 1) if (shares[p]! < threshold) sum += shares[p]!;
+  return sum;
 }
