@@ -61,7 +61,8 @@ function sorted(search: SelectQueryBuilder<CaseFile>, sort: string): SelectQuery
   const expression = orders[descending ? sort.slice(1) : sort] ?? 'c.updatedAt';
   return search
     .addSelect(`(${expression}) IS NULL`, 'sort_missing')
-    .addSelect(expression, 'sort_key')
+    // In brackets, or a plain column would be read as renamed and missing from the row.
+    .addSelect(`(${expression})`, 'sort_key')
     .orderBy('sort_missing', 'ASC')
     .addOrderBy('sort_key', descending ? 'DESC' : 'ASC')
     .addOrderBy('c.id', 'ASC');
