@@ -126,6 +126,16 @@ describe('DraftKeeper', () => {
     expect(keeper.read()).toMatchObject({ version: 4, theirs: null });
   });
 
+  it('goes on when somebody moved the version and left the text as it was', async () => {
+    const server = new Server();
+    const keeper = new DraftKeeper(server.kind(), server.stored);
+    server.stored = { version: 7, value: 'server' };
+    keeper.change('mine');
+    expect(await keeper.flush()).toBe(true);
+    expect(server.stored).toEqual({ version: 8, value: 'mine' });
+    expect(keeper.read()).toMatchObject({ theirs: null, saving: { state: 'saved' } });
+  });
+
   it('brings back text of a closed tab, and asks when the server moved on meanwhile', async () => {
     const server = new Server();
     browser.set('weighhouse.kept.note', JSON.stringify({ version: 3, value: 'left behind' }));

@@ -1,6 +1,6 @@
 import { type ApiError, isApiError } from './api';
 import { forget, keep, kept } from './kept';
-import type { Saving } from './draft-saver';
+import type { Saving } from './saving';
 
 /** A text as the server has it. */
 export interface Stored<T> {
@@ -168,6 +168,12 @@ export class DraftKeeper<T> {
     // An acknowledgement that got lost on the way comes back as one's own text.
     if (theirs && this.kind.same(theirs.value, this.snapshot.value)) {
       this.acknowledge(this.snapshot.value, theirs);
+      return;
+    }
+    // A review moved the version and left the text: there is nothing to choose.
+    if (theirs && this.kind.same(theirs.value, this.acknowledged)) {
+      this.put({ version: theirs.version, saving: { state: 'typing' } });
+      this.plan(0);
       return;
     }
     this.keepHere();

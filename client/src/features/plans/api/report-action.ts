@@ -10,6 +10,7 @@ export function useReportAction(caseId: string, actionId: string) {
     mutationFn: (words: string) => post(`/api/actions/${actionId}/done`, planViewSchema, { words }),
     onSuccess: (view) => {
       takePlan(client, caseId, view);
+      void client.invalidateQueries({ queryKey: ['case', caseId, 'summary'] });
     },
   });
 }

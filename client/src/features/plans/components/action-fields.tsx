@@ -10,7 +10,7 @@ interface Props {
   /** From 0. */
   place: number;
   last: number;
-  /** Where the server's faults name it, such as actions.2. */
+  /** Where the server's faults name it, such as actions[2]. */
   path: string;
   faults: readonly FieldFault[];
   people: readonly PersonRef[];

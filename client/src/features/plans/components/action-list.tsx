@@ -1,9 +1,10 @@
 import type { Plan } from '@weighhouse/shared/contracts/plans';
 import { useState } from 'react';
 import { Button } from '@radix-ui/themes';
+import { WordsForm } from '../../../components/words-form';
 import { useFormat } from '../../../lib/use-format';
+import { useReportAction } from '../api/report-action';
 import { lateWords } from '../model/plan-words';
-import { ActionDone } from './action-done';
 import { PlanPart } from './plan-text';
 
 type Action = Plan['actions'][number];
@@ -62,6 +63,7 @@ function ActionRow({
   mine: boolean;
 }) {
   const [reporting, setReporting] = useState(false);
+  const report = useReportAction(caseId, action.id);
   const canReport = signed && mine && action.doneAt === null;
   return (
     <>
@@ -97,9 +99,11 @@ function ActionRow({
       {canReport && reporting && (
         <tr className="no-print">
           <td colSpan={4} className="action-report">
-            <ActionDone
-              caseId={caseId}
-              action={action}
+            <WordsForm
+              keptKey={`action.${action.id}`}
+              label={`What was done, and what came of it: ${action.what}`}
+              verb="Report it done"
+              onSend={report.mutateAsync}
               onClose={() => {
                 setReporting(false);
               }}

@@ -115,7 +115,7 @@ export function ActionsEditor({ draft, faults, onChange, people }: Props) {
 /** The path by which the server names this action; one that it does not have yet gets none of its faults. */
 function pathOf(actions: readonly ActionDraft[], key: string): string {
   const place = sentPlace(actions, key);
-  return place === null ? `unsent.${key}` : `actions.${String(place)}`;
+  return place === null ? `unsent.${key}` : `actions[${String(place)}]`;
 }
 
 const shortened = (text: string) => (text.length > 40 ? `${text.slice(0, 38)}…` : text);

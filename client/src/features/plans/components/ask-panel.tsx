@@ -4,6 +4,7 @@ import { useState } from 'react';
 import { FailureLine } from '../../../components/failure';
 import { useFormat } from '../../../lib/use-format';
 import { useAskContributors } from '../api/ask-contributors';
+import { isOfText } from '../model/missing-words';
 import { stanceCount, waitingWords } from '../model/plan-words';
 import { PlanPart } from './plan-text';
 import { StanceList } from './stance-list';
@@ -16,12 +17,14 @@ interface Props {
 }
 
 /** Agreement and dissent, as the chair asks for and sees them. */
-export function AskPanel({ caseId, view: { draft, abilities }, save }: Props) {
+export function AskPanel({ caseId, view: { draft, abilities, missing }, save }: Props) {
   const format = useFormat();
   const ask = useAskContributors(caseId);
   const [unsaved, setUnsaved] = useState(false);
   const asked = draft?.askedAt ?? null;
-  const mayAsk = abilities.includes('plan.ask');
+  const whole = !missing.some(isOfText);
+  const mayAsk = abilities.includes('plan.ask') && whole;
+  const settled = draft?.stances.every((one) => one.stance !== null && one.changedSince !== true) ?? false;
 
   const send = async () => {
     const saved = await save();
@@ -37,13 +40,16 @@ export function AskPanel({ caseId, view: { draft, abilities }, save }: Props) {
           : `Asked ${format.moment(asked)}. ${draft ? `${stanceCount(draft)} ${waitingWords(draft)}` : ''}`}
       </p>
       {draft && asked !== null && <StanceList stances={draft.stances} />}
-      {mayAsk && (
+      {!whole && (
+        <p className="soft prose">They can be asked when the plan is complete: see below what is missing.</p>
+      )}
+      {mayAsk && !(asked !== null && settled) && (
         <div className="actions">
-          <Button variant="outline" loading={ask.isPending} disabled={!draft} onClick={() => void send()}>
+          <Button variant="outline" loading={ask.isPending} onClick={() => void send()}>
             {asked === null ? 'Ask contributors' : 'Ask again'}
           </Button>
           {asked !== null && (
-            <span className="soft small">Asking again asks everybody anew about the plan as it stands.</span>
+            <span className="soft small">Asks those who have not answered the plan as it stands.</span>
           )}
         </div>
       )}

@@ -4,6 +4,7 @@ import { useState } from 'react';
 import { ConfirmDialog } from '../../../components/confirm-dialog';
 import { fieldId } from '../../../components/faults';
 import { useConclude } from '../api/conclude';
+import { isOfText, missingWords } from '../model/missing-words';
 import { PlanPart } from './plan-text';
 
 interface Props {
@@ -67,18 +68,21 @@ function Missing({ missing }: Pick<PlanView, 'missing'>) {
     <>
       <p>Before the case can be closed, this is still missing:</p>
       <ul className="plain-list">
-        {missing.map(({ path, message }) => (
-          <li key={`${path} ${message}`}>
-            <a
-              href={`#${fieldId(path)}`}
-              onClick={(event) => {
-                const field = document.getElementById(fieldId(path));
-                event.preventDefault();
-                field?.focus();
-              }}
-            >
-              {message}
-            </a>
+        {missing.map((part) => (
+          <li key={`${part.path} ${part.message}`}>
+            {isOfText(part) && part.path !== 'plan' ? (
+              <a
+                href={`#${fieldId(part.path)}`}
+                onClick={(event) => {
+                  event.preventDefault();
+                  document.getElementById(fieldId(part.path))?.focus();
+                }}
+              >
+                {missingWords(part)}
+              </a>
+            ) : (
+              missingWords(part)
+            )}
           </li>
         ))}
       </ul>

@@ -18,20 +18,12 @@ import {
   rebaseDraft,
   sameDraft,
 } from '../model/plan-draft';
+import { planLabels } from '../model/missing-words';
 import { ActionsEditor } from './actions-editor';
 import { AskPanel } from './ask-panel';
 import { ConcludePanel } from './conclude-panel';
 import { DraftText } from './draft-text';
 import { type Choice, DiagnosisFields, LongField } from './plan-fields';
-
-export const planLabels: Readonly<Record<string, string>> = {
-  workingDiagnosis: 'Working diagnosis',
-  candidateId: 'Candidate',
-  certainty: 'How certain it is',
-  remainingDoubt: 'Remaining doubt',
-  actions: 'Actions',
-  safetyNet: 'Safety-net advice',
-};
 
 interface Props {
   caseId: string;

@@ -1,14 +1,10 @@
-import { Button, TextArea } from '@radix-ui/themes';
-import type { FieldFault } from '@weighhouse/shared/contracts/errors';
-import { dissentSchema, type Plan } from '@weighhouse/shared/contracts/plans';
-import { z } from 'zod';
-import { type SubmitEvent, useState } from 'react';
+import { Button } from '@radix-ui/themes';
+import type { Plan } from '@weighhouse/shared/contracts/plans';
+import { useState } from 'react';
 import { FailureLine } from '../../../components/failure';
-import { faultsIn } from '../../../components/faults';
-import { FormField } from '../../../components/form-field';
+import { WordsForm } from '../../../components/words-form';
 import { useFormat } from '../../../lib/use-format';
 import { useGiveStance } from '../api/give-stance';
-import { useKept } from '../../../lib/use-kept';
 
 interface Props {
   caseId: string;
@@ -29,18 +25,20 @@ export function StanceForm({ caseId, plan, mine }: Props) {
       <h3>{mine?.stance ? 'Your word on this plan' : 'You are asked: do you agree with this plan?'}</h3>
       <Said mine={mine} />
       {dissenting ? (
-        <DissentForm
-          caseId={caseId}
-          planId={plan.id}
-          give={give}
+        <WordsForm
+          keptKey={`dissent.${plan.id}`}
           before={mine?.words ?? ''}
+          label="What you want on the record against this plan"
+          hint="The chair and the team read it, and it stands in the signed plan."
+          verb="Put dissent on the record"
+          onSend={give.mutateAsync}
           onClose={close}
         />
       ) : (
         <>
           <FailureLine error={give.error} />
           <div className="actions">
-            {mine?.stance !== 'agree' && (
+            {(mine?.stance !== 'agree' || mine.changedSince === true) && (
               <Button
                 loading={give.isPending}
                 onClick={() => {
@@ -80,69 +78,8 @@ function Said({ mine }: Pick<Props, 'mine'>) {
         You {mine.stance === 'agree' ? 'agreed' : 'dissented'}, {format.moment(mine.at)}.{' '}
         <span className="soft">You can change it until the plan is signed.</span>
       </p>
+      {mine.changedSince === true && <p className="late">The plan was changed after you said this.</p>}
       {mine.words !== null && mine.words !== '' && <p className="note plan-words">{mine.words}</p>}
     </>
-  );
-}
-
-interface DissentProps {
-  caseId: string;
-  planId: string;
-  before: string;
-  give: ReturnType<typeof useGiveStance>;
-  onClose: () => void;
-}
-
-function DissentForm({ planId, before, give, onClose }: DissentProps) {
-  const [words, setWords, clear] = useKept(`dissent.${planId}`, z.string(), '');
-  const [faults, setFaults] = useState<FieldFault[]>([]);
-  const [touched, setTouched] = useState(false);
-  const text = touched || words !== '' ? words : before;
-
-  const send = (event: SubmitEvent) => {
-    event.preventDefault();
-    const found = faultsIn(dissentSchema, { words: text });
-    setFaults(found);
-    if (found.length > 0) return;
-    give.mutate(text.trim(), {
-      onSuccess: () => {
-        clear();
-        onClose();
-      },
-    });
-  };
-
-  return (
-    <form onSubmit={send}>
-      <FormField
-        label="What you want on the record against this plan"
-        path="words"
-        faults={faults}
-        hint="The chair and the team read it, and it stands in the signed plan."
-      >
-        {(control) => (
-          <TextArea
-            {...control}
-            autoFocus
-            rows={5}
-            maxLength={4000}
-            value={text}
-            onChange={(event) => {
-              setTouched(true);
-              setWords(event.target.value);
-            }}
-          />
-        )}
-      </FormField>
-      <FailureLine error={give.error} />
-      <div className="actions">
-        <Button type="submit" loading={give.isPending}>
-          Put dissent on the record
-        </Button>
-        <Button type="button" variant="outline" onClick={onClose}>
-          Not now
-        </Button>
-      </div>
-    </form>
   );
 }

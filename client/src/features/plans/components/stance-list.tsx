@@ -6,7 +6,7 @@ export function StanceList({ stances }: { stances: Plan['stances'] }) {
   const format = useFormat();
   return (
     <ul className="stance-list">
-      {stances.map(({ person, stance, words, at }) => (
+      {stances.map(({ person, stance, words, at, changedSince }) => (
         <li key={person.id}>
           <span className="stance-who">
             {person.name}
@@ -16,6 +16,9 @@ export function StanceList({ stances }: { stances: Plan['stances'] }) {
             {stance === null ? 'Not answered' : stance === 'agree' ? 'Agrees' : 'Dissents'}
             {at !== null && <span className="soft small"> {format.moment(at)}</span>}
           </span>
+          {changedSince === true && (
+            <span className="late small stance-note">The plan was changed after this was said.</span>
+          )}
           {words !== null && words !== '' && <p className="note plan-words">{words}</p>}
         </li>
       ))}

@@ -57,7 +57,7 @@ export const emptyAction = (key: string): ActionDraft => ({
 /** An action is sent once it says what is to be done. */
 export const isSent = (action: ActionDraft) => action.what.trim() !== '';
 
-/** Its place among the actions that the server has, as faults and missing parts name it; null for one not sent. */
+/** Its place among the actions that the server has, as faults and missing parts count it; null for one not sent. */
 export function sentPlace(actions: readonly ActionDraft[], key: string): number | null {
   const place = actions.filter(isSent).findIndex((action) => action.key === key);
   return place < 0 ? null : place;

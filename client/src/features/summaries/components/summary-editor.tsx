@@ -24,7 +24,7 @@ export function SummaryEditor({ summary, onHandedOver }: { summary: Summary; onH
     keptKey: `summary.${caseId}.${String(planNumber)}`,
     readKept: (left) => keptSchema.safeParse(left).data ?? null,
     same: (one, other) => one.trim() === other.trim(),
-    save: async (body, version) => storedOf(await save({ version, body: body.trim() })),
+    save: async (body, version) => storedOf(await save({ version, body: body.trim(), ready: false })),
     readTheirs: (error) => {
       const theirs = staleSummary(error);
       return theirs && storedOf(theirs);

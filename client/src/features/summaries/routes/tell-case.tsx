@@ -8,6 +8,7 @@ import { SkeletonPage } from '../../../components/skeleton';
 import { isApiError } from '../../../lib/api';
 import { useWatchCase } from '../../../lib/live';
 import { useCaseId } from '../../cases/api/get-case';
+import { useSignedIn } from '../../people/api/get-me';
 import { useSummary } from '../api/get-summary';
 import { Contacts } from '../components/contacts';
 import { IdentityForm } from '../components/identity-form';
@@ -43,7 +44,9 @@ export default function TellCase() {
 }
 
 function Loaded({ summary }: { summary: Summary }) {
-  const { caseId, number, planNumber, abilities } = summary;
+  const { caseId, number, planNumber } = summary;
+  // A chair who came here by an address gets no card to open.
+  const liaison = useSignedIn().roles.includes('liaison');
   return (
     <div className="page tell-page">
       <Back />
@@ -56,13 +59,13 @@ function Loaded({ summary }: { summary: Summary }) {
             </EmptyState>
           ) : (
             <>
-              <SummaryPart summary={summary} />
+              <SummaryPart key={planNumber} summary={summary} />
               <Contacts summary={summary} />
             </>
           )}
         </div>
         <div className="tell-side">
-          {abilities.includes('identity.read') && <Card caseId={caseId} />}
+          {liaison && <Card caseId={caseId} />}
           <PatientPart summary={summary} />
         </div>
       </div>
