@@ -38,8 +38,9 @@ export class CandidateChanges {
         rows.filter((row) => row.retiredInSet === null),
       );
       const candidateSet = file.candidateSet + 1;
-      const row = work.em.create(CandidateRow, {
-        id: randomUUID(),
+      const id = randomUUID();
+      await work.em.insert(CandidateRow, {
+        id,
         caseId,
         position: Math.max(-1, ...rows.map((known) => known.position)) + 1,
         name: input.name,
@@ -50,10 +51,9 @@ export class CandidateChanges {
         addedById: actor.id,
         addedAt: this.clock.now(),
       });
-      await work.em.insert(CandidateRow, row);
       const line = { actorId: actor.id, action: 'candidate.added', sentence: 'added a candidate' };
       await this.changes.commit(work, file, 'candidates', line, { candidateSet });
-      const [entry] = await this.candidates.entries([row], work.em);
+      const entry = (await this.candidates.inForce(caseId, work.em)).find((known) => known.id === id);
       if (!entry) throw notFound();
       return entry;
     });

@@ -43,7 +43,11 @@ export class CandidatesService {
     return this.entries(rows, em);
   }
 
-  async entries(rows: CandidateRow[], em?: EntityManager): Promise<CandidateEntry[]> {
+  async count(caseId: string): Promise<number> {
+    return (await this.inForce(caseId)).length;
+  }
+
+  private async entries(rows: CandidateRow[], em: EntityManager): Promise<CandidateEntry[]> {
     const people = await this.people.byIds(
       rows.map((row) => row.addedById),
       em,
@@ -59,10 +63,6 @@ export class CandidatesService {
       addedInSet: row.addedInSet,
       retiredInSet: row.retiredInSet,
     }));
-  }
-
-  async count(caseId: string): Promise<number> {
-    return (await this.inForce(caseId)).length;
   }
 }
 

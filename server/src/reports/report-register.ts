@@ -35,7 +35,7 @@ export class ReportRegister {
       if (number >= most) {
         throw new Refusal('wrong-state', `The case holds ${String(most)} reports, the most it can.`);
       }
-      const row = work.em.create(ReportRow, {
+      const row: ReportRow = {
         id: randomUUID(),
         caseId,
         fileName: stored.fileName,
@@ -46,8 +46,8 @@ export class ReportRegister {
         uploadedById: actor.id,
         uploadedAt: this.clock.now(),
         removedAt: null,
-      });
-      await work.em.insert(ReportRow, row);
+      };
+      await work.em.insert(ReportRow, { ...row });
       const line = { actorId: actor.id, action: 'report.added', sentence: 'added a report' };
       await this.changes.commit(work, file, 'reports', line);
       if (!wanted()) throw new Refusal('malformed', 'The upload was cancelled.');
