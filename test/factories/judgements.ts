@@ -30,6 +30,15 @@ export interface CaseWishes {
   candidates?: string[];
   findings?: Record<string, unknown>[];
   weights?: number[];
+  /** People of this case alone; otherwise the cases of a test file share theirs. */
+  ownPeople?: boolean;
+}
+
+interface Cast {
+  referrer: SeatedPerson;
+  chair: SeatedPerson;
+  liaison: SeatedPerson;
+  specialists: SeatedPerson[];
 }
 
 const threeFindings = [
@@ -44,14 +53,30 @@ export async function seat(running: RunningApp, role: Role | Role[]): Promise<Se
   return { ...person, agent: await signedIn(running, person) };
 }
 
+const casts = new WeakMap<RunningApp, Promise<Cast>>();
+
+/** Signing in is slow on purpose, so the cases of one running application share their people. */
+function castOf(running: RunningApp): Promise<Cast> {
+  const known = casts.get(running) ?? makeCast(running);
+  casts.set(running, known);
+  return known;
+}
+
+async function makeCast(running: RunningApp): Promise<Cast> {
+  const [referrer, chair, liaison, ...specialists] = await Promise.all([
+    seat(running, 'referrer'),
+    seat(running, 'chair'),
+    seat(running, 'liaison'),
+    ...[1, 2, 3, 4].map(() => seat(running, 'specialist')),
+  ]);
+  return { referrer, chair, liaison, specialists };
+}
+
 /** Plays a case through the API from the draft to the accepted one, ready for its first round. */
 export async function acceptedCase(running: RunningApp, wishes: CaseWishes = {}): Promise<JudgedCase> {
-  const referrer = await seat(running, 'referrer');
-  const chair = await seat(running, 'chair');
-  const liaison = await seat(running, 'liaison');
-  const contributors: SeatedPerson[] = [];
-  for (let k = 0; k < (wishes.contributors ?? 3); k += 1)
-    contributors.push(await seat(running, 'specialist'));
+  const cast = wishes.ownPeople === true ? await makeCast(running) : await castOf(running);
+  const { referrer, chair, liaison } = cast;
+  const contributors = cast.specialists.slice(0, wishes.contributors ?? 3);
 
   const opened = await referrer.agent
     .post('/api/cases')

@@ -47,6 +47,6 @@ const views = [DifferentialService, LedgerParts, MineService, PanelService, Seal
     SealsController,
   ],
   providers: [...rounds, ...judgements, ...pool, ...views],
-  exports: [StandingService, RoundReader, EndRoundsService, DifferentialService],
+  exports: [StandingService, RoundReader, EndRoundsService, DifferentialService, PanelService],
 })
 export class DifferentialModule {}
