@@ -114,7 +114,6 @@ export async function requireBuilt(parts, { processes, say, dataDirectory }) {
         program: process.execPath,
         args: part.command,
         cwd: part.cwd,
-        env: { ...process.env, NO_COLOR: '1' },
         logFile,
       });
       if (exit !== 0) throw new LaunchFault(`Could not build ${part.name}.${logTail(logFile, 60)}`);

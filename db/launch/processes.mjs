@@ -102,7 +102,8 @@ export function createProcesses({ changed = () => undefined } = {}) {
     const [program, args] = withParentDeath(command);
     const child = spawn(program, args, {
       cwd: command.cwd ?? projectRoot,
-      env: command.env ?? process.env,
+      // Colours are for a terminal; in a log they are in the way.
+      env: { ...(command.env ?? process.env), ...(log === null ? {} : { NO_COLOR: '1' }) },
       detached: true,
       stdio: ['ignore', log ?? 'inherit', log ?? 'inherit'],
     });
