@@ -11,9 +11,11 @@ const folders = ['cmaps', 'standard_fonts', 'wasm', 'iccs'];
 export function pdfFiles(): Plugin {
   const home = dirname(createRequire(import.meta.url).resolve('pdfjs-dist/package.json'));
   let outDir = '';
+  let building = false;
   return {
     name: 'pdf-files',
     configResolved(config) {
+      building = config.command === 'build';
       outDir = join(config.root, config.build.outDir);
     },
     configureServer(server) {
@@ -29,6 +31,7 @@ export function pdfFiles(): Plugin {
       });
     },
     async closeBundle() {
+      if (!building) return;
       for (const folder of folders)
         await cp(join(home, folder), join(outDir, 'pdf', folder), { recursive: true });
     },

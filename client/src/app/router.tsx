@@ -14,11 +14,13 @@ const lazy = (path: string, load: Load, children?: RouteObject[]): RouteObject =
   ...(children ? { children } : {}),
 });
 
+const index = (load: Load): RouteObject => ({
+  index: true,
+  lazy: async () => ({ Component: (await load()).default }),
+});
+
 const sections: RouteObject[] = [
-  {
-    index: true,
-    lazy: async () => ({ Component: (await import('../features/cases/routes/first-section')).default }),
-  },
+  index(() => import('../features/cases/routes/first-section')),
   lazy('history', () => import('../features/cases/routes/history')),
   lazy('reports', () => import('../features/reports/routes/reports')),
   lazy('differential', () => import('../features/differential/routes/differential')),
@@ -30,6 +32,8 @@ const sections: RouteObject[] = [
   ]),
   lazy('summary', () => import('../features/summaries/routes/summary')),
   lazy('trail', () => import('../features/trail/routes/trail')),
+  lazy('team', () => import('../features/cases/routes/team')),
+  lazy('settings', () => import('../features/cases/routes/settings')),
 ];
 
 export const router = createBrowserRouter([
@@ -48,7 +52,7 @@ export const router = createBrowserRouter([
               lazy('/', () => import('../features/today/routes/today')),
               lazy('/cases', () => import('../features/cases/routes/cases')),
               lazy('/cases/new', () => import('../features/cases/routes/new-referral')),
-              lazy('/cases/:caseId/edit', () => import('../features/cases/routes/referral')),
+              lazy('/cases/:caseId/edit', () => import('./referral-page')),
               lazy('/cases/:caseId', () => import('../features/cases/routes/case-page'), sections),
               lazy('/tell', () => import('../features/summaries/routes/tell')),
               lazy('/tell/:caseId', () => import('../features/summaries/routes/tell-case')),

@@ -8,7 +8,7 @@ import { SignInForm } from '../features/people/components/sign-in-form';
 import { useLiveState } from '../lib/live';
 import { TimeZoneContext } from '../lib/use-format';
 import { AccountMenu } from './account-menu';
-import { BrandMark } from './brand';
+import { BrandMark } from '../components/brand-mark';
 import { placesOf } from './navigation';
 import { useSessionOver } from './session-over';
 

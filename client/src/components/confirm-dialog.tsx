@@ -1,5 +1,5 @@
 import { AlertDialog, Button, TextArea, TextField } from '@radix-ui/themes';
-import { type FormEvent, type ReactNode, useState } from 'react';
+import { type SubmitEvent, type ReactNode, useState } from 'react';
 import { isApiError } from '../lib/api-error';
 import { FailureLine } from './failure';
 import { FormField } from './form-field';
@@ -54,7 +54,7 @@ function ConfirmForm(props: Omit<Props, 'open' | 'onOpenChange'> & { onDone: () 
     (wordsLabel !== undefined && wordsOptional !== true && input.words.trim() === '') ||
     (password === true && input.password === '');
 
-  const confirm = async (event: FormEvent) => {
+  const confirm = async (event: SubmitEvent) => {
     event.preventDefault();
     setBusy(true);
     setError(null);

@@ -13,6 +13,7 @@ describe('faults', () => {
     expect(faultOf(faults, 'name')).toBe('Must not be empty.');
     expect(faultOf(faults, 'action')).toBeNull();
     expect(faultOf(undefined, 'name')).toBeNull();
+    expect(faultOf([{ path: 'team[1].reason', message: 'must be text' }], 'team')).toBe('Must be text.');
   });
 
   it('says the same as the server does, all faults at once', () => {

@@ -9,7 +9,9 @@ export function fieldId(path: string): string {
 
 /** The faults at a path or below it, as a sentence. */
 export function faultOf(faults: readonly FieldFault[] | undefined, path: string): string | null {
-  const mine = (faults ?? []).filter((fault) => fault.path === path || fault.path.startsWith(`${path}.`));
+  const mine = (faults ?? []).filter(
+    ({ path: at }) => at === path || at.startsWith(`${path}.`) || at.startsWith(`${path}[`),
+  );
   if (mine.length === 0) return null;
   const messages = [...new Set(mine.map((fault) => fault.message))];
   return capital(`${messages.join('; ')}.`);

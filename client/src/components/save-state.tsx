@@ -1,13 +1,7 @@
+import type { Saving } from '../lib/saving';
 import { useFormat } from '../lib/use-format';
 
-/** How far what was typed has come. */
-export type Saving =
-  | { state: 'clean' }
-  | { state: 'typing' }
-  | { state: 'saving' }
-  | { state: 'saved'; at: string }
-  | { state: 'failed'; offline: boolean }
-  | { state: 'stale' };
+export type { Saving };
 
 /** "Saved 14:02", "Saving", "Not saved: offline, kept here"; told to screen readers when it changes. */
 export function SaveState({ saving }: { saving: Saving }) {

@@ -8,8 +8,11 @@ const titles: Partial<Record<Case['state'], string>> = {
   withdrawn: 'Withdrawn',
 };
 
-/** The words with which the case was returned, declined, withdrawn or reopened, while they still matter. */
-export function CaseBanner({ of }: { of: Case }) {
+/**
+ * The words with which the case was returned, declined, withdrawn or reopened, while they still matter.
+ * `quiet` leaves out the way to the referral, where one is there already.
+ */
+export function CaseBanner({ of, quiet = false }: { of: Case; quiet?: boolean }) {
   const format = useFormat();
   const { words } = of;
   const reopened = of.state === 'judging' && words?.move === 'reopen';
@@ -26,7 +29,7 @@ export function CaseBanner({ of }: { of: Case }) {
           </p>
         </>
       )}
-      {of.abilities.includes('case.edit') && (
+      {!quiet && of.abilities.includes('case.edit') && (
         <p>
           <Link to={`/cases/${of.id}/edit`}>
             {of.state === 'draft'

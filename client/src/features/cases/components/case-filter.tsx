@@ -13,12 +13,20 @@ interface Props {
 export function CaseFilter({ query, onChange }: Props) {
   const [typed, setTyped] = useState(query.q ?? '');
   const asked = query.q ?? '';
-  useEffect(() => {
-    setTyped(asked);
-  }, [asked]);
+  const [seen, setSeen] = useState({ asked, sent: asked });
+  const ask = (q: string) => {
+    setSeen((before) => ({ ...before, sent: q }));
+    onChange({ q });
+  };
+  // The address changed: unless it was this field, it takes over what is asked now.
+  if (seen.asked !== asked) {
+    setSeen({ ...seen, asked });
+    if (seen.sent !== asked) setTyped(asked);
+  }
   useEffect(() => {
     if (typed.trim() === asked) return;
     const timer = setTimeout(() => {
+      setSeen((before) => ({ ...before, sent: typed.trim() }));
       onChange({ q: typed.trim() });
     }, 350);
     return () => {
@@ -32,7 +40,7 @@ export function CaseFilter({ query, onChange }: Props) {
       role="search"
       onSubmit={(event) => {
         event.preventDefault();
-        onChange({ q: typed.trim() });
+        ask(typed.trim());
       }}
     >
       <TextField.Root
@@ -68,6 +76,7 @@ export function CaseFilter({ query, onChange }: Props) {
           color="gray"
           highContrast
           onClick={() => {
+            setTyped('');
             onChange({ q: '', state: '' });
           }}
         >

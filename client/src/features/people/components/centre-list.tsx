@@ -1,7 +1,7 @@
 import { Button, TextField } from '@radix-ui/themes';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
 import { newCentreSchema } from '@weighhouse/shared/contracts/people';
-import { type FormEvent, useState } from 'react';
+import { type SubmitEvent, useState } from 'react';
 import { FailureLine } from '../../../components/failure';
 import { faultsIn } from '../../../components/faults';
 import { FormField } from '../../../components/form-field';
@@ -17,7 +17,7 @@ export function CentreList() {
   const [typed, setTyped] = useState(empty);
   const [faults, setFaults] = useState<FieldFault[]>([]);
 
-  const submit = async (event: FormEvent) => {
+  const submit = async (event: SubmitEvent) => {
     event.preventDefault();
     const found = faultsIn(newCentreSchema, typed);
     setFaults(found);

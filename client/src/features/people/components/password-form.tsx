@@ -1,6 +1,6 @@
 import { Button, TextField } from '@radix-ui/themes';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
-import { type FormEvent, useState } from 'react';
+import { type SubmitEvent, useState } from 'react';
 import { ErrorSummary } from '../../../components/error-summary';
 import { FailureLine } from '../../../components/failure';
 import { FormField } from '../../../components/form-field';
@@ -18,7 +18,7 @@ export function PasswordForm() {
   const [faults, setFaults] = useState<FieldFault[]>([]);
   const change = useChangePassword();
 
-  const submit = async (event: FormEvent) => {
+  const submit = async (event: SubmitEvent) => {
     event.preventDefault();
     const found = newPasswordFaults('newPassword', typed.newPassword, typed.again);
     if (typed.currentPassword === '')

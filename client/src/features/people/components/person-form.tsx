@@ -1,7 +1,7 @@
 import { Button, Dialog, TextField } from '@radix-ui/themes';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
 import { type InvitePerson, invitePersonSchema, type Person } from '@weighhouse/shared/contracts/people';
-import { type FormEvent, useState } from 'react';
+import { type SubmitEvent, useState } from 'react';
 import { ErrorSummary } from '../../../components/error-summary';
 import { FailureLine } from '../../../components/failure';
 import { faultsIn } from '../../../components/faults';
@@ -29,7 +29,7 @@ export function PersonForm({ person, onDone }: { person: Person | null; onDone: 
   const centres = useCentres();
   const { invite, change } = useChangePeople();
 
-  const submit = async (event: FormEvent) => {
+  const submit = async (event: SubmitEvent) => {
     event.preventDefault();
     const found = faultsIn(invitePersonSchema, {
       ...typed,

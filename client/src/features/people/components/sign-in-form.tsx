@@ -1,5 +1,5 @@
 import { Button, TextField } from '@radix-ui/themes';
-import { type FormEvent, useState } from 'react';
+import { type SubmitEvent, useState } from 'react';
 import { FailureLine } from '../../../components/failure';
 import { FormField } from '../../../components/form-field';
 import { isApiError } from '../../../lib/api';
@@ -15,7 +15,7 @@ export function SignInForm({ email: known = '' }: { email?: string }) {
   const throttled = isApiError(signIn.error, 'too-many') ? signIn.error : null;
   const wait = useCountdown(throttled ? (throttled.retryAfterSeconds ?? 60) : 0, signIn.submittedAt);
 
-  const submit = (event: FormEvent) => {
+  const submit = (event: SubmitEvent) => {
     event.preventDefault();
     signIn.mutate({ email, password });
   };

@@ -6,7 +6,6 @@ export function useCountdown(seconds: number, since: number): number {
   const end = since + seconds * 1000;
   useEffect(() => {
     if (seconds === 0) return;
-    setNow(Date.now());
     const timer = setInterval(() => {
       setNow(Date.now());
     }, 1000);
@@ -14,5 +13,6 @@ export function useCountdown(seconds: number, since: number): number {
       clearInterval(timer);
     };
   }, [seconds, since]);
-  return seconds === 0 ? 0 : Math.max(0, Math.ceil((end - now) / 1000));
+  // The clock is read once a second, so before its first beat it may be older than `since`.
+  return Math.min(seconds, Math.max(0, Math.ceil((end - now) / 1000)));
 }

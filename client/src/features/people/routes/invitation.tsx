@@ -1,9 +1,9 @@
 import '../components/entry.css';
 import { Button } from '@radix-ui/themes';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
-import { type FormEvent, useState } from 'react';
+import { type SubmitEvent, useState } from 'react';
 import { Link, useNavigate, useParams } from 'react-router-dom';
-import { BrandMark } from '../../../app/brand';
+import { BrandMark } from '../../../components/brand-mark';
 import { ErrorSummary } from '../../../components/error-summary';
 import { Failure, FailureLine } from '../../../components/failure';
 import { useDocumentTitle } from '../../../components/page-title';
@@ -57,7 +57,7 @@ function SetPassword({ token, email }: { token: string; email: string }) {
   const signIn = useSignIn();
   const navigate = useNavigate();
 
-  const submit = async (event: FormEvent) => {
+  const submit = async (event: SubmitEvent) => {
     event.preventDefault();
     const found = newPasswordFaults('password', typed.password, typed.again);
     setFaults(found);

@@ -1,5 +1,5 @@
 import { Navigate, useSearchParams } from 'react-router-dom';
-import { BrandMark } from '../../../app/brand';
+import { BrandMark } from '../../../components/brand-mark';
 import { useDocumentTitle } from '../../../components/page-title';
 import { useMe } from '../api/get-me';
 import { returnPath } from '../components/return-path';

@@ -1,5 +1,13 @@
-import { EmptyState } from '../../../components/empty-state';
+import { useCase, useCaseId } from '../../cases/api/get-case';
+import { Reports } from '../components/reports';
 
-export default function NotBuilt() {
-  return <EmptyState title="This section is not part of this version." />;
+/** The section of a case with its reports. */
+export default function ReportsPage() {
+  const caseId = useCaseId();
+  const { data } = useCase(caseId);
+  return (
+    <section className="page reports-page" aria-label="Reports">
+      <Reports caseId={caseId} mayAdd={data?.abilities.includes('report.add') ?? false} />
+    </section>
+  );
 }

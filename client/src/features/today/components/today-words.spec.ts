@@ -1,5 +1,4 @@
-import type { TodayItem } from '@weighhouse/shared/contracts/today';
-import { todayKindSchema } from '@weighhouse/shared/contracts/today';
+import { type TodayItem, todayKindSchema } from '@weighhouse/shared/contracts/today';
 import { describe, expect, it } from 'vitest';
 import { dueLine, kinds, oldestLine, todayTitle } from './today-words';
 

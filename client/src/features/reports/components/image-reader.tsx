@@ -1,0 +1,42 @@
+import type { Report } from '@weighhouse/shared/contracts/reports';
+import { useState } from 'react';
+import { Failure } from '../../../components/failure';
+import { offlineError } from '../../../lib/api-error';
+import { contentPath } from '../api/list-reports';
+import { ZoomButtons } from './zoom-buttons';
+
+/** A picture; it scrolls in its own frame when it is enlarged. */
+export function ImageReader({ report }: { report: Report }) {
+  const [zoom, setZoom] = useState(1);
+  const [attempt, setAttempt] = useState(0);
+  const [failed, setFailed] = useState(false);
+  if (failed)
+    return (
+      <Failure
+        error={offlineError()}
+        what="The picture could not be loaded."
+        retry={() => {
+          setFailed(false);
+          setAttempt((count) => count + 1);
+        }}
+      />
+    );
+  return (
+    <>
+      <div className="reader-tools">
+        <ZoomButtons zoom={zoom} onZoom={setZoom} />
+      </div>
+      <div className="reader-frame" tabIndex={0} role="region" aria-label="Picture">
+        <img
+          key={attempt}
+          src={contentPath(report.id)}
+          alt={`Report ${report.fileName}`}
+          style={{ width: `${String(zoom * 100)}%` }}
+          onError={() => {
+            setFailed(true);
+          }}
+        />
+      </div>
+    </>
+  );
+}
