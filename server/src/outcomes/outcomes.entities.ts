@@ -1,2 +1,4 @@
+import { OutcomeRow } from './outcome.entity.js';
+
 /** The tables of this domain. */
-export const outcomesEntities: (new () => object)[] = [];
+export const outcomesEntities = [OutcomeRow];
