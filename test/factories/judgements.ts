@@ -55,8 +55,8 @@ export async function seat(running: RunningApp, role: Role | Role[]): Promise<Se
 
 const casts = new WeakMap<RunningApp, Promise<Cast>>();
 
-/** Signing in is slow on purpose, so the cases of one running application share their people. */
-function castOf(running: RunningApp): Promise<Cast> {
+/** Signing in is slow on purpose, so the cases of one running application share their people; made in `beforeAll`. */
+export function castOf(running: RunningApp): Promise<Cast> {
   const known = casts.get(running) ?? makeCast(running);
   casts.set(running, known);
   return known;

@@ -60,9 +60,9 @@ export function connect(running: RunningApp, headers: Record<string, string>): L
     socket,
     heard,
     of,
-    watch: (caseId) => socket.timeout(3000).emitWithAck(liveEvents.watch, { caseId }) as Promise<unknown>,
+    watch: (caseId) => socket.timeout(15_000).emitWithAck(liveEvents.watch, { caseId }) as Promise<unknown>,
     until: async (event, fits = () => true) => {
-      for (const began = Date.now(); Date.now() - began < 5000; await wait(5)) {
+      for (const began = Date.now(); Date.now() - began < 15_000; await wait(5)) {
         const found = of(event).find(fits);
         if (found) return found;
       }
