@@ -54,6 +54,7 @@ function routesOf(controller: Controller): Route[] {
 describe('every route', () => {
   let running: RunningApp;
   let routes: Route[];
+  let document: ReturnType<typeof openApiDocument>;
 
   beforeAll(async () => {
     running = await startApp();
@@ -62,6 +63,7 @@ describe('every route', () => {
       [...module.controllers.values()].map((item) => item.metatype as Controller),
     );
     routes = controllers.flatMap(routesOf);
+    document = openApiDocument(running.app);
   });
   afterAll(() => running.close());
 
@@ -84,7 +86,6 @@ describe('every route', () => {
   });
 
   it('stands in the OpenAPI document with the schema of its answer and, where it takes one, of its body', () => {
-    const document = openApiDocument(running.app);
     const operations = Object.entries(document.paths).flatMap(([path, item]) =>
       Object.entries(item).map(([method, operation]) => ({
         path,
@@ -103,7 +104,6 @@ describe('every route', () => {
   });
 
   it.each(pinned())('is at its pinned place: %s %s', (method, path) => {
-    const document = openApiDocument(running.app);
     const names = (text: string): string => text.replace(/\{[^}]+\}/g, '{}');
     const item = Object.entries(document.paths).find(([known]) => names(known) === names(path))?.[1];
     expect(item && method.toLowerCase() in item, `${method} ${path}`).toBe(true);
