@@ -21,37 +21,43 @@ export function OutcomePanel({ caseId, mayRecord }: Props) {
   if (isPending) return mayRecord ? <SkeletonText lines={2} /> : null;
   if (data === undefined)
     return <Failure error={error} what="The outcome could not be loaded." retry={() => void refetch()} />;
-  if (data) return <Recorded outcome={data} />;
-  if (!mayRecord) return null;
+  if (!mayRecord) return data && <Recorded outcome={data} />;
   return (
-    <section className="outcome" aria-label="Outcome">
-      <h2>What it turned out to be is not known yet</h2>
-      {writing ? (
-        <OutcomeForm
-          caseId={caseId}
-          onClose={() => {
-            setWriting(false);
-          }}
-        />
-      ) : (
-        <>
-          <p className="soft prose">
-            When the illness has a name, by a biopsy, a course of treatment or time, record it. The panel
-            learns from it.
-          </p>
-          <div className="actions no-print">
-            <Button
-              variant="outline"
-              onClick={() => {
-                setWriting(true);
-              }}
-            >
-              Record the outcome
-            </Button>
-          </div>
-        </>
-      )}
-    </section>
+    <>
+      {data && <Recorded outcome={data} />}
+      <section className="outcome" aria-label="Record the outcome">
+        <h2>
+          {data
+            ? 'The case was reopened and closed again since'
+            : 'What it turned out to be is not known yet'}
+        </h2>
+        {writing ? (
+          <OutcomeForm
+            caseId={caseId}
+            onClose={() => {
+              setWriting(false);
+            }}
+          />
+        ) : (
+          <>
+            <p className="soft prose">
+              When the illness has a name, by a biopsy, a course of treatment or time, record it. The panel
+              learns from it.
+            </p>
+            <div className="actions no-print">
+              <Button
+                variant="outline"
+                onClick={() => {
+                  setWriting(true);
+                }}
+              >
+                Record the outcome
+              </Button>
+            </div>
+          </>
+        )}
+      </section>
+    </>
   );
 }
 

@@ -75,7 +75,7 @@ function ActionRow({
           )}
         </td>
         <td data-label="Who">{action.owner?.name ?? <span className="soft">Nobody yet</span>}</td>
-        <td data-label="By when">
+        <td data-label="By when" className="action-due">
           <Due action={action} />
         </td>
         {signed && (
@@ -122,7 +122,7 @@ function Due({ action }: { action: Action }) {
   return (
     <>
       {format.date(action.due)}
-      {late !== null && <span className="late action-told">{late}</span>}
+      {late !== null && <span className="late action-told"> {late}</span>}
     </>
   );
 }

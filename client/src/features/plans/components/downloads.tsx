@@ -3,9 +3,9 @@ import { FailureLine } from '../../../components/failure';
 import { type ExportFormat, useDownloadExport } from '../api/download-export';
 
 const files: readonly { format: ExportFormat; label: string; ability: string }[] = [
-  { format: 'pdf', label: 'Plan as PDF', ability: 'export.read' },
+  { format: 'pdf', label: 'Differential and plan as PDF', ability: 'export.read' },
   { format: 'letter', label: 'Letter to the referrer', ability: 'export.read' },
-  { format: 'fhir', label: 'FHIR document', ability: 'export.read' },
+  { format: 'fhir', label: 'FHIR bundle', ability: 'export.read' },
   { format: 'panel', label: 'Panel as JSON', ability: 'panel.read' },
 ];
 

@@ -1,5 +1,5 @@
 import type { Certainty } from '@weighhouse/shared/contracts/plans';
-import { type ReactNode, useId } from 'react';
+import type { ReactNode } from 'react';
 import { certaintyWords } from '../model/certainty-words';
 
 interface Text {
@@ -54,10 +54,9 @@ export function PlanPart({
   note?: ReactNode;
   children: ReactNode;
 }) {
-  const id = useId();
   return (
-    <section className="plan-part" aria-labelledby={id}>
-      <h3 id={id}>{title}</h3>
+    <section className="plan-part">
+      <h3>{title}</h3>
       {note}
       {children}
     </section>

@@ -32,14 +32,16 @@ const view = (draft: Plan | null, signed: Plan[] = []) => ({ draft, signed, miss
 describe('plan words', () => {
   it('says in the title what is so', () => {
     const stances = [stance('Dr A', 'agree'), stance('Dr B', null), stance('Dr C', null)];
-    expect(planTitle(view(null))).toBe('No plan yet');
-    expect(planTitle(view(plan({ stances })))).toBe('Plan 1 is a draft; nobody has been asked yet');
+    expect(planTitle(view(null), true)).toBe('No plan yet');
+    expect(planTitle(view(plan({ stances })), true)).toBe('Plan 1 is a draft; nobody has been asked yet');
     const asked = plan({ stances, askedAt: '2026-12-01T10:00:00Z' });
-    expect(planTitle(view(asked))).toBe('Plan 1: one of three contributors answered');
-    expect(planTitle(view({ ...asked, stances: [stance('Dr A', 'dissent')] }))).toBe(
+    expect(planTitle(view(asked), true)).toBe('Plan 1: one of three contributors answered');
+    expect(planTitle(view({ ...asked, stances: [stance('Dr A', 'dissent')] }), true)).toBe(
       'Plan 1: every contributor answered',
     );
-    expect(planTitle(view(null, [plan({ number: 2 }), plan({ number: 1 })]))).toBe('Closed with plan 2');
+    const signed = view(null, [plan({ number: 2 }), plan({ number: 1 })]);
+    expect(planTitle(signed, false)).toBe('Closed with plan 2');
+    expect(planTitle(signed, true)).toBe('Reopened since plan 2; no later plan yet');
   });
 
   it('names who has not answered and counts who has', () => {

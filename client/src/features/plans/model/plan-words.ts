@@ -1,10 +1,17 @@
 import type { Plan, PlanView } from '@weighhouse/shared/contracts/plans';
 import { capital, counted, listed, numberWord } from '../../../lib/words';
 
-/** What is so with the plan, as a title. */
-export function planTitle({ draft, signed }: PlanView): string {
+/**
+ * What is so with the plan, as a title.
+ * @param working the case is being worked on, for the first time or again
+ */
+export function planTitle({ draft, signed }: PlanView, working: boolean): string {
   const newest = signed[0];
-  if (!draft) return newest ? `Closed with plan ${String(newest.number)}` : 'No plan yet';
+  if (!draft) {
+    if (!newest) return 'No plan yet';
+    const number = String(newest.number);
+    return working ? `Reopened since plan ${number}; no later plan yet` : `Closed with plan ${number}`;
+  }
   const name = `Plan ${String(draft.number)}`;
   if (draft.askedAt === null) return `${name} is a draft; nobody has been asked yet`;
   const { answered, asked } = progress(draft);

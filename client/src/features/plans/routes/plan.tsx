@@ -44,12 +44,13 @@ export default function PlanSection() {
 
 function Loaded({ view, ofCase }: { view: PlanView; ofCase: Case }) {
   const { id: meId } = useSignedIn();
+  const working = ofCase.state === 'accepted' || ofCase.state === 'judging';
   const { draft, signed, abilities } = view;
   const writes = abilities.includes('plan.write');
   const number = draft?.number ?? (signed[0]?.number ?? 0) + 1;
   return (
     <div className="plan-section">
-      <h2 className="plan-title">{planTitle(view)}</h2>
+      <h2 className="plan-title">{planTitle(view, working)}</h2>
       {(writes || draft) && (
         <div className="plan-work">
           <StandingAside caseId={ofCase.id} />

@@ -9,14 +9,14 @@ import { useFormat } from '../../../lib/use-format';
 import { useKept } from '../../../lib/use-kept';
 import { useLogContact } from '../api/log-contact';
 import { checkContact, type ContactDraft, contactDraftSchema, emptyContact } from '../model/contact-draft';
-import { howWords, understoodWords } from '../model/summary-words';
+import { howWords } from '../model/summary-words';
 import { Choices } from './choices';
 
 const labels = {
   at: 'When',
   how: 'How',
-  reached: 'Was the patient reached?',
-  understood: 'Was it understood?',
+  reached: 'The patient was reached',
+  understood: 'It was understood',
   questions: 'Questions the patient asked',
   notes: 'Notes',
 };
@@ -106,7 +106,7 @@ export function ContactForm({ caseId, telling, onClose }: Props) {
             label={labels.understood}
             path="understood"
             faults={faults}
-            choices={understoodWords}
+            choices={{ yes: 'Yes', partly: 'In part', no: 'No' }}
             value={typed.understood}
             onChange={(understood) => {
               put({ understood: understood as ContactDraft['understood'] });

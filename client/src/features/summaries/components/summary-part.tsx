@@ -30,6 +30,9 @@ export function SummaryPart({ summary }: { summary: Summary }) {
         />
       ) : (
         <>
+          {state === 'waiting' && (
+            <p className="soft">Handed to the chair. You can tell the patient when it is approved.</p>
+          )}
           <StateLine summary={summary} />
           <SummaryText body={summary.body} />
           <div className="actions">
@@ -62,12 +65,11 @@ export function SummaryPart({ summary }: { summary: Summary }) {
   );
 }
 
-/** Who approved it and when, or what it waits for. */
+/** Who approved it and when, and when it was told. */
 export function StateLine({ summary }: { summary: Summary }) {
   const format = useFormat();
-  const { state, approvedBy, approvedAt, toldAt } = summary;
+  const { approvedBy, approvedAt, toldAt } = summary;
   const words = [
-    state === 'waiting' ? 'Handed to the chair. You can tell the patient when it is approved.' : '',
     approvedAt === null
       ? ''
       : `Approved${approvedBy === null ? '' : ` by ${approvedBy}`}, ${format.moment(approvedAt)}.`,
