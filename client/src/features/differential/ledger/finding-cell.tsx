@@ -24,8 +24,10 @@ export function FindingCell({ finding, column, row }: { finding: Finding; column
       <span className="ledger-figure" aria-hidden="true">
         {cell.ownFigure && <span className="mark-diamond mark-diamond--inline" />}
         <span className="figures">{cell.figure && <MovingFigure share={cell.figure.share} />}</span>
-        {cell.figure && named && <span className="ledger-level">{levelName(finding, cell.figure.level)}</span>}
-        {cell.unjudged === 'cell' && <span className="ledger-level">not judged</span>}
+        {cell.unjudged === 'cell' && <span className="ledger-level">assumed</span>}
+        {cell.figure && named && cell.unjudged === 'no' && (
+          <span className="ledger-level">{levelName(finding, cell.figure.level)}</span>
+        )}
       </span>
       {cell.sealed && <span className="ledger-sealed" aria-hidden="true" />}
       {!cell.sealed && (cell.decibans !== null || cell.ticks.length > 0) && (

@@ -1,3 +1,4 @@
+import { withSoftHyphens } from '../model/soft-hyphens';
 import { useLedger } from './ledger-context';
 
 /** The candidates as columns. */
@@ -11,7 +12,10 @@ export function HeaderRow() {
       {columns.map((column) => (
         <th key={column.id} scope="col" className="ledger-candidate" title={column.name}>
           <span className="ledger-letter">{column.letter}</span>
-          <span className="ledger-candidate-name">{column.short}</span>
+          <span className="aside-text">{column.name}</span>
+          <span className="ledger-candidate-name" aria-hidden="true">
+            {withSoftHyphens(column.short)}
+          </span>
           {column.mustNotMiss && <span className="ledger-must">must not miss</span>}
         </th>
       ))}

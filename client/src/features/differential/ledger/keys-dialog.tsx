@@ -16,7 +16,7 @@ const keys: [string, string][] = [
 export function KeysDialog({ open, onOpenChange }: { open: boolean; onOpenChange: (open: boolean) => void }) {
   return (
     <Dialog.Root open={open} onOpenChange={onOpenChange}>
-      <Dialog.Content maxWidth="480px" aria-describedby={undefined}>
+      <Dialog.Content className="ledger-dialog" aria-describedby={undefined}>
         <Dialog.Title size="4">Keys in the ledger</Dialog.Title>
         <table className="keys-table">
           <tbody>

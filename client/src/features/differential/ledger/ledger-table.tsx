@@ -16,7 +16,7 @@ const titleWidth = 308;
 const narrowTitleWidth = 280;
 const leastTitleWidth = 200;
 const goodColumnWidth = 92;
-const leastColumnWidth = 92;
+const leastColumnWidth = 84;
 
 /** The titles give way to the figures where it is narrow. */
 function titleFor(width: number, columns: number): number {

@@ -24,9 +24,9 @@ export function PriorRow() {
   );
 }
 
-function priorLine({ assessment, sealed }: ReturnType<typeof useLedger>['differential']): string {
+function priorLine({ assessment, sealed, mine }: ReturnType<typeof useLedger>['differential']): string {
   if (assessment) return assessment.priorGiven ? 'Starting shares, pooled' : 'Nobody gave a prior: all start alike';
-  return sealed ? 'Starting shares, yours' : 'Starting shares';
+  return sealed && mine ? 'Starting shares, yours' : 'Starting shares';
 }
 
 function PriorCell({ column }: { column: Column }) {

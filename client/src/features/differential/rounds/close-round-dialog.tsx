@@ -18,11 +18,12 @@ export function CloseRoundDialog({ open, onOpenChange, round }: Props) {
       open={open}
       onOpenChange={onOpenChange}
       title={`Close round ${String(round.number)}`}
-      verb="Close the round"
+      verb={sealed ? 'Close it unopened' : 'Close the round'}
+      danger={sealed}
       onConfirm={() => close.mutateAsync(round.id)}
     >
       Nobody can judge any more until you open another round.
-      {sealed && ' It is still sealed: closed like this, its numbers stay sealed.'}
+      {sealed && ' It was not unsealed: closed like this, its numbers are never shown to anybody.'}
     </ConfirmDialog>
   );
 }

@@ -20,7 +20,7 @@ interface Props {
 export function HandInDialog({ open, onOpenChange, round, mine }: Props) {
   return (
     <Dialog.Root open={open} onOpenChange={onOpenChange}>
-      <Dialog.Content maxWidth="520px" aria-describedby={undefined}>
+      <Dialog.Content className="ledger-dialog" aria-describedby={undefined}>
         <HandInForm
           round={round}
           mine={mine}
@@ -105,7 +105,7 @@ function Blanks() {
       {lists.length === 0 && !blanks.priorMissing && <p>Nothing is blank. All {counted(blanks.total, 'row')} are judged.</p>}
       {lists.map((list) => (
         <div key={list.title}>
-          <h3>{list.title}</h3>
+          <h2>{list.title}</h2>
           <ul className="plain-list">
             {list.items.map((item) => (
               <li key={item}>{item}</li>

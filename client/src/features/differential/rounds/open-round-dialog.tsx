@@ -17,7 +17,7 @@ interface Props {
 export function OpenRoundDialog({ open, onOpenChange }: Props) {
   return (
     <Dialog.Root open={open} onOpenChange={onOpenChange}>
-      <Dialog.Content maxWidth="480px" aria-describedby={undefined}>
+      <Dialog.Content className="ledger-dialog" aria-describedby={undefined}>
         <OpenRoundForm
           onDone={() => {
             onOpenChange(false);

@@ -23,7 +23,7 @@ export function UnsealDialog({ open, onOpenChange, round, count, hindrance }: Pr
   if (hindrance !== null)
     return (
       <Dialog.Root open={open} onOpenChange={onOpenChange}>
-        <Dialog.Content maxWidth="480px">
+        <Dialog.Content className="ledger-dialog">
           <Dialog.Title size="4">Round {round.number} cannot be unsealed yet</Dialog.Title>
           <Dialog.Description size="2">
             {hindrance} Not in: {listed(missing)}.
