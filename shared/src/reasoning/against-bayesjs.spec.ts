@@ -6,6 +6,7 @@ import { bayesNetwork } from './testing/bayes-network.js';
 import { expectClose } from './testing/expect-close.js';
 import { type NoisyOrRow, independentPanel } from './testing/independent-panel.js';
 import { holds } from './testing/laws-hold.js';
+import { sixteenConditions, sixteenConditionsFolded } from './testing/sixteen-conditions.js';
 
 /*
  * The other library knows nothing of panels, pools or sets: it is given the
@@ -49,5 +50,14 @@ describe('a two-level network', () => {
         priors.map((_, k) => inferred[`condition ${k}`]!['yes']),
       );
     });
+  });
+
+  it('of sixteen conditions and 21 findings has it too', () => {
+    const { network, evidence } = sixteenConditionsFolded();
+    const inferred = inferAll(network, evidence, { precision: 15, force: true });
+    expectClose(
+      assess(sixteenConditions()).standing.slice(0, -1),
+      Array.from({ length: 16 }, (_, k) => inferred[`condition ${k}`]!['yes']),
+    );
   });
 });

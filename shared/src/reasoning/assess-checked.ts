@@ -18,14 +18,14 @@ import { type View, ownView, viewOf } from './view.js';
 
 const method = 'weighhouse/1';
 
-interface Pooled {
+interface Reasoned {
   rows: PooledRows;
   view: View;
   exponents: Exponents;
   reasoning: Reasoning;
 }
 
-function pool(panel: CheckedPanel): Pooled {
+function reason(panel: CheckedPanel): Reasoned {
   const rows = poolRows(panel);
   const view = viewOf(panel, pooledPrior(panel), rows);
   const raised = exponents(panel, rows.judged, panel.tempering);
@@ -38,12 +38,12 @@ function pool(panel: CheckedPanel): Pooled {
 
 /** The standing of a checked panel alone. */
 export function standingOfChecked(panel: CheckedPanel): StandingOnly {
-  return { method, standing: listed(pool(panel).reasoning.standing) };
+  return { method, standing: listed(reason(panel).reasoning.standing) };
 }
 
 /** The whole assessment of a checked panel. */
 export function assessChecked(panel: CheckedPanel): Assessment {
-  const { rows, view, exponents: raised, reasoning } = pool(panel);
+  const { rows, view, exponents: raised, reasoning } = reason(panel);
   const { contributors } = panel;
   const standing = listed(reasoning.standing);
   const ownViews = contributors.map((_, j) => ownView(panel, j, view));
@@ -84,15 +84,15 @@ function withoutEach(
   reasoning: Reasoning,
 ): Assessment['without'] {
   const counting = panel.contributors.filter(({ weight }) => weight > 0).length;
+  const contributors = rows.withoutEach((j, others): [string, number[] | null] => {
+    const { id, weight } = panel.contributors[j]!;
+    if (weight === 0) return [id, listed(reasoning.standing)];
+    if (counting === 1) return [id, null];
+    const view = viewOf(panel, pooledPrior(panel, j), others);
+    return [id, listed(reasoning.standingOf(view, exponents(panel, view.judged, panel.tempering)))];
+  });
   return {
-    contributors: keyed(
-      panel.contributors.map(({ id, weight }, j): [string, number[] | null] => {
-        if (weight === 0) return [id, listed(reasoning.standing)];
-        if (counting === 1) return [id, null];
-        const others = viewOf(panel, pooledPrior(panel, j), rows.without(j));
-        return [id, listed(reasoning.standingOf(others, exponents(panel, others.judged, panel.tempering)))];
-      }),
-    ),
+    contributors: keyed(contributors),
     findings: keyed(
       panel.findings.flatMap(({ id, observed }, r): [string, number[]][] =>
         observed !== null && view.judged[r] ? [[id, listed(reasoning.withoutFinding(r))]] : [],

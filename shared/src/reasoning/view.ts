@@ -1,5 +1,5 @@
 import { columnEvidence } from './evidence/column-evidence.js';
-import type { PooledRows } from './pool/pooled-rows.js';
+import type { Pooled } from './pool/pooled-rows.js';
 import type { CheckedPanel } from './validation/checked-panel.js';
 
 /** One way to see a panel: the pooled one, one contributor's own, or the pooled one with somebody left out. */
@@ -14,11 +14,7 @@ export interface View {
   evidence: Float64Array;
 }
 
-export function viewOf(
-  panel: CheckedPanel,
-  prior: Float64Array,
-  { cells, judged }: Pick<PooledRows, 'cells' | 'judged'>,
-): View {
+export function viewOf(panel: CheckedPanel, prior: Float64Array, { cells, judged }: Pooled): View {
   return { prior, cells, judged, evidence: columnEvidence(panel, cells, judged) };
 }
 

@@ -1,12 +1,12 @@
 import fc from 'fast-check';
-import { describe, it } from 'vitest';
+import { describe, expect, it } from 'vitest';
 import { type Assessment, type Panel, assess } from '../assess.js';
 import { arbitraryPanel } from '../testing/arbitrary-panel.js';
 import { expectClose } from '../testing/expect-close.js';
 import { holds } from '../testing/laws-hold.js';
 import { randomPanel } from '../testing/random-panel.js';
 import { readPanel } from '../validation/read-panel.js';
-import { assessPlainly } from './assess-plainly.js';
+import { assessPlainly, judgePlainly } from './assess-plainly.js';
 
 /** Everything but decibans within 1e-12; those are up to 300 times as large and get 1e-10. */
 function expectSame(fast: Assessment, plain: Assessment): void {
@@ -51,5 +51,23 @@ describe('the engine and the plain one say the same', () => {
       fc.property(shapes, fc.nat(), (shape, seed) => both(randomPanel(shape, seed))),
       { numRuns: 60, seed: 1 },
     );
+  });
+
+  it('where only sets of up to a size are counted', () => {
+    for (const [candidates, times] of [
+      [18, 1],
+      [24, 1],
+      [30, 5],
+    ] as const) {
+      const shape = { candidates, findings: 3, pending: 0, contributors: 2, coexistence: 0.2 };
+      const panel = { ...randomPanel(shape, candidates), together: [{ a: 0, b: candidates - 1, times }] };
+      const { exact, leftOut, standing } = assess(panel);
+      const plain = judgePlainly(readPanel(panel));
+      expectClose(
+        { exact, leftOut, standing },
+        { exact: false, leftOut: plain.now.leftOut, standing: plain.standing },
+      );
+      expect(leftOut === null).toBe(times !== 1);
+    }
   });
 });

@@ -23,24 +23,19 @@ export function writeCell(odds: Float64Array, cells: Float64Array, from: number,
 
 /**
  * Fills the columns of a row that nobody judged with the equal-weight log pool
- * of those that somebody judged.
+ * of those that somebody judged, at least one.
  *
- * @param weights total weight behind each cell, at the cell's first place; 0 where nobody judged it
+ * @param odds with the total weight behind each cell at the cell's first place: 0 where nobody judged it
  */
-export function fillUnjudged(
-  odds: Float64Array,
-  weights: Float64Array,
-  { start, levels }: CheckedFinding,
-  columns: number,
-): void {
+export function fillUnjudged(odds: Float64Array, { start, levels }: CheckedFinding, columns: number): void {
   const end = start + columns * levels;
   let judged = 0;
-  for (let from = start; from < end; from += levels) if (weights[from]! > 0) judged += 1;
-  if (judged === columns || judged === 0) return;
+  for (let from = start; from < end; from += levels) if (odds[from]! > 0) judged += 1;
+  if (judged === columns) return;
   for (let level = 1; level < levels; level += 1) {
     let sum = 0;
-    for (let from = start; from < end; from += levels) if (weights[from]! > 0) sum += odds[from + level]!;
+    for (let from = start; from < end; from += levels) if (odds[from]! > 0) sum += odds[from + level]!;
     for (let from = start; from < end; from += levels)
-      if (weights[from] === 0) odds[from + level] = sum / judged;
+      if (odds[from] === 0) odds[from + level] = sum / judged;
   }
 }

@@ -1,51 +1,59 @@
-import type { CheckedPanel } from '../validation/checked-panel.js';
+import type { CheckedFinding, CheckedPanel } from '../validation/checked-panel.js';
 import { countingWeights } from './counting-weights.js';
 import { fillUnjudged, writeCell, writeOdds } from './odds.js';
 
-/** Every row pooled over all contributors, and over all but one. */
-export interface PooledRows {
-  /** All pooled cells, where the findings say; zeros in rows nobody judged. */
+/** Rows as pooled: all cells, where the findings say, and for each finding whether anybody of positive weight judged it. */
+export interface Pooled {
   cells: Float64Array;
-  /** Total weight behind each cell, at the cell's first place. */
-  weights: Float64Array;
-  /** For each finding: whether anybody of positive weight judged it. */
   judged: readonly boolean[];
-  /** The same with one contributor left out. */
-  without(contributor: number): Pick<PooledRows, 'cells' | 'judged'>;
 }
 
-/**
- * Pools every cell over those who filled it in, weights w_j × exposure.
- *
- * Leaving one contributor out adds the sums of those before and those after;
- * nothing is subtracted, so that a small weight beside a large one loses no digits.
- */
+export interface PooledRows extends Pooled {
+  /** Total weight behind each cell, at the cell's first place; 0 where nobody judged it. */
+  weights: Float64Array;
+  /**
+   * For each contributor in turn the rows pooled without them. Only observed
+   * rows are worked out, and each answer writes over the one before.
+   */
+  withoutEach<Value>(use: (contributor: number, pooled: Pooled) => Value): Value[];
+}
+
+/** Pools every cell over those who filled it in, weights w_j × exposure. */
 export function poolRows(panel: CheckedPanel): PooledRows {
-  const { cellCount, contributors } = panel;
+  const { cellCount, contributors, findings } = panel;
   const counting = countingWeights(panel);
-  /** Sums over the contributors before j (j from 0 to their number): odds × weight, and the weight in the first place. */
-  const before = Array.from({ length: contributors.length + 1 }, () => new Float64Array(cellCount));
-  const terms = contributors.map((_, j) => {
-    const term = weightedOdds(panel, j, counting[j]!);
-    addLists(before[j]!, term, before[j + 1]!);
-    return term;
-  });
-  const all = finish(panel, before[contributors.length]!);
-  /** Sums over the contributors after j, made when first asked for. */
-  const after: Float64Array[] = [];
-  const sumAfter = (j: number): Float64Array => {
-    const known = after[j];
-    if (known) return known;
-    const sum = new Float64Array(cellCount);
-    if (j + 1 < contributors.length) addLists(terms[j + 1]!, sumAfter(j + 1), sum);
-    return (after[j] = sum);
-  };
+  const terms = contributors.map((_, j) => weightedOdds(panel, j, counting[j]!));
+  const all = new Float64Array(cellCount);
+  for (const term of terms) add(term, all);
+  const cells = new Float64Array(cellCount);
   return {
-    ...all,
-    without(j) {
-      const sum = new Float64Array(cellCount);
-      addLists(before[j]!, sumAfter(j), sum);
-      return finish(panel, sum);
+    cells,
+    weights: all,
+    judged: findings.map((finding) => writePooledRow(finding, panel.columns, all, cells)),
+
+    /*
+     * The sum without somebody is that of those before plus that of those
+     * after. Nothing is subtracted, so that a small weight beside a large one
+     * loses no digits.
+     */
+    withoutEach(use) {
+      const after = terms.map(() => new Float64Array(cellCount));
+      for (let j = terms.length - 2; j >= 0; j -= 1) {
+        after[j]!.set(after[j + 1]!);
+        add(terms[j + 1]!, after[j]!);
+      }
+      const before = new Float64Array(cellCount);
+      const others = new Float64Array(cellCount);
+      const pooled = new Float64Array(cellCount);
+      return terms.map((term, j) => {
+        others.set(before);
+        add(after[j]!, others);
+        add(term, before);
+        const judged = findings.map(
+          (finding) => finding.observed !== null && writePooledRow(finding, panel.columns, others, pooled),
+        );
+        return use(j, { cells: pooled, judged });
+      });
     },
   };
 }
@@ -55,7 +63,7 @@ function weightedOdds(
   { columns, findings, cellCount, contributors }: CheckedPanel,
   j: number,
   counting: number,
-) {
+): Float64Array {
   const { cells, exposures } = contributors[j]!;
   const term = new Float64Array(cellCount);
   if (counting === 0) return term;
@@ -74,28 +82,31 @@ function weightedOdds(
   return term;
 }
 
-function addLists(one: Float64Array, other: Float64Array, sum: Float64Array): void {
-  for (let index = 0; index < sum.length; index += 1) sum[index] = one[index]! + other[index]!;
+function add(terms: Float64Array, sums: Float64Array): void {
+  for (let index = 0; index < sums.length; index += 1) sums[index]! += terms[index]!;
 }
 
-/** Divides the sums by their weights, fills unjudged columns and turns odds into shares. */
-function finish({ columns, findings }: CheckedPanel, sums: Float64Array) {
-  const cells = new Float64Array(sums.length);
-  const odds = new Float64Array(sums.length);
-  const judged = findings.map((finding) => {
-    const { start, levels } = finding;
-    const end = start + columns * levels;
-    let filled = false;
-    for (let from = start; from < end; from += levels) {
-      const weight = sums[from]!;
-      if (weight === 0) continue;
-      filled = true;
-      for (let level = 1; level < levels; level += 1) odds[from + level] = sums[from + level]! / weight;
-    }
-    if (!filled) return false;
-    fillUnjudged(odds, sums, finding, columns);
-    for (let from = start; from < end; from += levels) writeCell(odds, cells, from, levels);
-    return true;
-  });
-  return { cells, weights: sums, judged };
+/**
+ * Turns the sums of one row into mean log odds, in place, fills its unjudged
+ * columns and writes its cells. Returns whether anybody judged the row.
+ */
+function writePooledRow(
+  finding: CheckedFinding,
+  columns: number,
+  sums: Float64Array,
+  cells: Float64Array,
+): boolean {
+  const { start, levels } = finding;
+  const end = start + columns * levels;
+  let judged = false;
+  for (let from = start; from < end; from += levels) {
+    const weight = sums[from]!;
+    if (weight === 0) continue;
+    judged = true;
+    for (let level = 1; level < levels; level += 1) sums[from + level]! /= weight;
+  }
+  if (!judged) return false;
+  fillUnjudged(sums, finding, columns);
+  for (let from = start; from < end; from += levels) writeCell(sums, cells, from, levels);
+  return true;
 }

@@ -1,3 +1,4 @@
+import { limits } from '../validation/limits.js';
 import type { CheckedFinding } from '../validation/checked-panel.js';
 import type { Half, SetTable } from './set-table.js';
 
@@ -18,59 +19,79 @@ export interface MoreLevelTable {
   least: number;
 }
 
-/** P(v | S) ∝ P(v | none) Π_{k∈S} P(v | k) / P(v | none), divided by the term of the level asked for. */
+/** Room for one table of any number of levels, used again for row after row. */
+export function moreLevelSpace({ low, high }: SetTable): MoreLevelTable {
+  const most = limits.levels - 1;
+  return {
+    kind: 'more',
+    others: most,
+    reliability: 1,
+    mixed: 0,
+    low: new Float64Array(low.members.length * most),
+    high: new Float64Array(high.members.length * most),
+    least: 0,
+  };
+}
+
+/**
+ * P(v | S) ∝ P(v | none) Π_{k∈S} P(v | k) / P(v | none), divided by the term of
+ * the level asked for.
+ *
+ * @returns the table given as room for it, filled
+ */
 export function moreLevelTable(
-  table: SetTable,
+  table: MoreLevelTable,
+  sets: SetTable,
   cells: Float64Array,
   { start, levels, reliability }: CheckedFinding,
   level: number,
   mixed: number,
 ): MoreLevelTable {
   const others = levels - 1;
-  const none = start + table.candidates * levels;
-  const low = halfOdds(table.low, cells, start, levels, level, none);
-  const high = halfOdds(table.high, cells, start, levels, level, none);
+  const none = start + sets.candidates * levels;
   let most = 1;
   for (let other = 0; other < others; other += 1) {
+    const v = other < level ? other : other + 1;
     // The odds of *none of these* itself come in once, with the low half.
-    const odds = cells[none + (other < level ? other : other + 1)]! / cells[none + level]!;
-    for (let place = other; place < low.length; place += others) low[place]! *= odds;
-    most += largest(low, other, others) * largest(high, other, others);
+    const odds = cells[none + v]! / cells[none + level]!;
+    const largestLow = writeOdds(table.low, sets.low, cells, start, levels, other, v, level, none, odds);
+    const largestHigh = writeOdds(table.high, sets.high, cells, start, levels, other, v, level, none, 1);
+    most += largestLow * largestHigh;
   }
-  return { kind: 'more', others, reliability, mixed, low, high, least: mixed + reliability / most };
+  table.others = others;
+  table.reliability = reliability;
+  table.mixed = mixed;
+  table.least = mixed + reliability / most;
+  return table;
 }
 
 /**
- * For each subset of a half and each other level v the product over its members
- * of the odds of v against the level asked for, each divided by those of *none
- * of these*; 1 for the empty subset.
+ * For each subset of a half the product over its members of the odds of v
+ * against the level asked for, each divided by those of *none of these*, times
+ * `first`. Returns the largest.
  */
-function halfOdds(
-  half: Half,
+function writeOdds(
+  odds: Float64Array,
+  { parents, added }: Half,
   cells: Float64Array,
   start: number,
   levels: number,
+  other: number,
+  v: number,
   level: number,
   none: number,
-): Float64Array {
-  const { parents, added } = half;
+  first: number,
+): number {
   const others = levels - 1;
-  const odds = new Float64Array(parents.length * others).fill(1, 0, others);
+  const against = cells[none + level]! / cells[none + v]!;
+  odds[other] = first;
+  let largest = first;
   for (let index = 1; index < parents.length; index += 1) {
     const cell = start + added[index]! * levels;
-    const against = cells[none + level]! / cells[cell + level]!;
-    for (let other = 0; other < others; other += 1) {
-      const v = other < level ? other : other + 1;
-      const change = (cells[cell + v]! / cells[none + v]!) * against;
-      odds[index * others + other] = odds[parents[index]! * others + other]! * change;
-    }
+    const value =
+      (odds[parents[index]! * others + other]! * cells[cell + v]! * against) / cells[cell + level]!;
+    odds[index * others + other] = value;
+    if (value > largest) largest = value;
   }
-  return odds;
-}
-
-function largest(values: Float64Array, from: number, step: number): number {
-  let most = 0;
-  for (let place = from; place < values.length; place += step)
-    if (values[place]! > most) most = values[place]!;
-  return most;
+  return largest;
 }

@@ -9,23 +9,18 @@ import type { TwoLevelTable } from './two-level-table.js';
  * common cases of more than two, have loops without an inner one.
  */
 
-/** Multiplies each set's entry by P'(level | set) of every row. */
-export function multiplyByRows(entries: Float64Array, list: SetList, rows: readonly RowTable[]): void {
-  let waiting: TwoLevelTable | null = null;
-  for (const row of rows) {
-    if (row.kind === 'more') multiplyByMoreLevels(entries, list, row);
-    else if (waiting) {
-      multiplyByTwoRows(entries, list, waiting, row);
-      waiting = null;
-    } else waiting = row;
-  }
-  if (waiting) multiplyByTwoLevels(entries, list, waiting);
+/** Multiplies each set's entry by P'(level | set). */
+export function multiplyByRow(entries: Float64Array, list: SetList, row: RowTable): void {
+  if (row.kind === 'two') multiplyByTwoLevels(entries, list, row);
+  else if (row.others === 2) multiplyByThreeLevels(entries, list, row);
+  else if (row.others === 3) multiplyByFourLevels(entries, list, row);
+  else multiplyByManyLevels(entries, list, row);
 }
 
-/** Writes P'(level | set) of one row for each set of the list. */
+/** Writes P'(level | set) for each set of the list. */
 export function writeRow(entries: Float64Array, list: SetList, row: RowTable): void {
   entries.fill(1, 0, list.size);
-  multiplyByRows(entries, list, [row]);
+  multiplyByRow(entries, list, row);
 }
 
 function multiplyByTwoLevels(entries: Float64Array, { starts, lows }: SetList, table: TwoLevelTable): void {
@@ -42,7 +37,8 @@ function multiplyByTwoLevels(entries: Float64Array, { starts, lows }: SetList, t
   }
 }
 
-function multiplyByTwoRows(
+/** Multiplies each set's entry by P' of two rows of two levels at once. */
+export function multiplyByTwoRows(
   entries: Float64Array,
   { starts, lows }: SetList,
   x: TwoLevelTable,
@@ -63,12 +59,6 @@ function multiplyByTwoRows(
       entries[p]! *= (bx + fx * oneX[l]! + sx * otherX[l]!) * (by + fy * oneY[l]! + sy * otherY[l]!);
     }
   }
-}
-
-function multiplyByMoreLevels(entries: Float64Array, list: SetList, table: MoreLevelTable): void {
-  if (table.others === 2) multiplyByThreeLevels(entries, list, table);
-  else if (table.others === 3) multiplyByFourLevels(entries, list, table);
-  else multiplyByManyLevels(entries, list, table);
 }
 
 function multiplyByThreeLevels(

@@ -5,7 +5,7 @@ import { expectClose } from '../testing/expect-close.js';
 import { holds } from '../testing/laws-hold.js';
 import { membersOf } from './explains.js';
 import { writeRow } from './row-kernels.js';
-import { rowTable } from './row-table.js';
+import { rowSpace, rowTable } from './row-table.js';
 import { type SetTable, setTable } from './set-table.js';
 import fc from 'fast-check';
 
@@ -30,7 +30,7 @@ function likelihoods(
   level: number,
 ): { members: number[]; p: number; least: number }[] {
   const levels = row[0]!.length;
-  const tables = rowTable(table, Float64Array.from(row.flat()), finding(levels), row.length, level);
+  const tables = rowTable(rowSpace(table), Float64Array.from(row.flat()), finding(levels), row.length, level);
   const values = new Float64Array(table.size);
   writeRow(values, table, tables);
   const sets: { members: number[]; p: number; least: number }[] = [];

@@ -8,6 +8,11 @@ export interface Support extends SetList {
   positions: Int32Array;
   /** Posterior of all sets that are not in the list. */
   aside: number;
+  /** Working space, a number for each set of the list. */
+  work: Float64Array;
+  divided: Float64Array;
+  /** For columns that were asked for, whether they are the case in each set. */
+  holds: Map<number, Float64Array>;
 }
 
 /**
@@ -37,19 +42,26 @@ export function significantSets(table: SetTable, shares: Float64Array, budget: n
     }
     keptStarts[h + 1] = count;
   }
-  return {
-    starts: keptStarts,
-    lows: keptLows.subarray(0, count),
-    size: count,
-    shares: keptShares.subarray(0, count),
-    positions: positions.subarray(0, count),
-    aside,
-  };
+  return support(keptStarts, keptLows.subarray(0, count), keptShares.subarray(0, count), positions, aside);
 }
 
 /** All sets, for the rare question that the significant ones cannot answer. */
 export function allSets({ starts, lows, size }: SetTable, shares: Float64Array): Support {
-  return { starts, lows, size, shares, positions: Int32Array.from({ length: size }, (_, p) => p), aside: 0 };
+  const positions = new Int32Array(size);
+  for (let p = 0; p < size; p += 1) positions[p] = p;
+  return support(starts, lows, shares, positions, 0);
+}
+
+function support(
+  starts: Int32Array,
+  lows: Uint16Array,
+  shares: Float64Array,
+  positions: Int32Array,
+  aside: number,
+): Support {
+  const size = shares.length;
+  const [work, divided] = [new Float64Array(size), new Float64Array(size)];
+  return { starts, lows, size, shares, positions, aside, work, divided, holds: new Map() };
 }
 
 /** A share such that all smaller ones sum to at most the budget, within a factor of 2 of the largest such. */

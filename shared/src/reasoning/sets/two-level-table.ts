@@ -30,40 +30,35 @@ interface HalfEffects {
   shut: Float64Array;
 }
 
-function halfEffects(
-  half: Half,
-  cells: Float64Array,
-  start: number,
-  leak: number,
-  loudAtFirst: number,
-): HalfEffects {
-  const { parents, added } = half;
-  const size = parents.length;
-  const quiet = new Float64Array(size);
-  const loud = new Float64Array(size);
-  const open = new Float64Array(size);
-  const shut = new Float64Array(size);
-  quiet[0] = 1 - loudAtFirst;
-  loud[0] = loudAtFirst;
-  open[0] = 1;
-  for (let index = 1; index < size; index += 1) {
-    const parent = parents[index]!;
-    const cell = start + 2 * added[index]!;
-    const present = cells[cell + 1]!;
-    if (present >= leak) {
-      const brings = (present - leak) / (1 - leak);
-      loud[index] = loud[parent]! + quiet[parent]! * brings;
-      quiet[index] = (quiet[parent]! * cells[cell]!) / (1 - leak);
-      open[index] = open[parent]!;
-      shut[index] = shut[parent]!;
-    } else {
-      loud[index] = loud[parent]!;
-      quiet[index] = quiet[parent]!;
-      shut[index] = shut[parent]! + (open[parent]! * (leak - present)) / leak;
-      open[index] = (open[parent]! * present) / leak;
-    }
-  }
-  return { quiet, loud, open, shut };
+/** Room for one table, used again for row after row: making lists takes longer than filling them. */
+export interface TwoLevelSpace {
+  low: HalfEffects;
+  high: HalfEffects;
+  table: TwoLevelTable;
+}
+
+export function twoLevelSpace({ low, high }: SetTable): TwoLevelSpace {
+  const effectsOf = ({ members }: Half): HalfEffects => ({
+    quiet: new Float64Array(members.length),
+    loud: new Float64Array(members.length),
+    open: new Float64Array(members.length),
+    shut: new Float64Array(members.length),
+  });
+  const lowEffects = effectsOf(low);
+  const highEffects = effectsOf(high);
+  return {
+    low: lowEffects,
+    high: highEffects,
+    table: {
+      kind: 'two',
+      base: highEffects.shut,
+      first: highEffects.open,
+      second: highEffects.loud,
+      one: lowEffects.loud,
+      other: lowEffects.quiet,
+      least: 0,
+    },
+  };
 }
 
 /**
@@ -72,56 +67,75 @@ function halfEffects(
  *
  * @param start where the row's cells begin: absent, present for each column, *none of these* last
  * @param mixed the part of P' that does not depend on the set
+ * @returns the table of the space, filled
  */
 export function twoLevelTable(
-  table: SetTable,
+  space: TwoLevelSpace,
+  sets: SetTable,
   cells: Float64Array,
   start: number,
   reliability: number,
   mixed: number,
   level: number,
 ): TwoLevelTable {
-  const leak = cells[start + 2 * table.candidates + 1]!;
-  const low = halfEffects(table.low, cells, start, leak, leak);
-  const high = halfEffects(table.high, cells, start, leak, 0);
+  const { low, high, table } = space;
+  const leak = cells[start + 2 * sets.candidates + 1]!;
+  writeEffects(low, sets.low, cells, start, leak, leak);
+  writeEffects(high, sets.high, cells, start, leak, 0);
   const present = level === 1;
-  // The tables of the high half are written over what they are made of; nothing else needs it.
-  const base = high.shut;
-  const first = high.open;
-  const second = present ? high.loud : high.quiet;
+  table.second = present ? high.loud : high.quiet;
+  table.one = present ? low.loud : low.shut;
+  const { base, first, second, one, other } = table;
+  // The tables are written over what they are made of: `base` is `shut`, `first` is `open`.
   for (let h = 0; h < base.length; h += 1) {
     base[h] = present ? mixed : mixed + reliability * base[h]!;
     first[h]! *= reliability;
     second[h]! *= first[h]!;
   }
-  const one = present ? low.loud : low.shut;
-  const other = low.quiet;
+  let leastOne = Infinity;
+  let leastOther = Infinity;
   for (let l = 0; l < one.length; l += 1) {
     other[l]! *= low.open[l]!;
     if (present) one[l]! *= low.open[l]!;
+    if (one[l]! < leastOne) leastOne = one[l]!;
+    if (other[l]! < leastOther) leastOther = other[l]!;
   }
-  return { kind: 'two', base, first, second, one, other, least: leastOf(base, first, second, one, other) };
-}
-
-function leastOf(
-  base: Float64Array,
-  first: Float64Array,
-  second: Float64Array,
-  one: Float64Array,
-  other: Float64Array,
-): number {
-  const smallestOne = smallest(one);
-  const smallestOther = smallest(other);
-  let least = Infinity;
+  table.least = Infinity;
   for (let h = 0; h < base.length; h += 1) {
-    const value = base[h]! + first[h]! * smallestOne + second[h]! * smallestOther;
-    if (value < least) least = value;
+    const value = base[h]! + first[h]! * leastOne + second[h]! * leastOther;
+    if (value < table.least) table.least = value;
   }
-  return least;
+  return table;
 }
 
-function smallest(values: Float64Array): number {
-  let least = Infinity;
-  for (let index = 0; index < values.length; index += 1) if (values[index]! < least) least = values[index]!;
-  return least;
+function writeEffects(
+  { quiet, loud, open, shut }: HalfEffects,
+  { parents, added }: Half,
+  cells: Float64Array,
+  start: number,
+  leak: number,
+  loudAtFirst: number,
+): void {
+  quiet[0] = 1 - loudAtFirst;
+  loud[0] = loudAtFirst;
+  open[0] = 1;
+  shut[0] = 0;
+  const perQuiet = 1 / (1 - leak);
+  const perLeak = 1 / leak;
+  for (let index = 1; index < parents.length; index += 1) {
+    const parent = parents[index]!;
+    const cell = start + 2 * added[index]!;
+    const present = cells[cell + 1]!;
+    if (present >= leak) {
+      loud[index] = loud[parent]! + quiet[parent]! * (present - leak) * perQuiet;
+      quiet[index] = quiet[parent]! * cells[cell]! * perQuiet;
+      open[index] = open[parent]!;
+      shut[index] = shut[parent]!;
+    } else {
+      loud[index] = loud[parent]!;
+      quiet[index] = quiet[parent]!;
+      shut[index] = shut[parent]! + open[parent]! * (leak - present) * perLeak;
+      open[index] = open[parent]! * present * perLeak;
+    }
+  }
 }

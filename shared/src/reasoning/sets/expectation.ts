@@ -1,0 +1,43 @@
+import type { Expectation } from '../reasoning.js';
+import type { Asked, Bounded } from './asked.js';
+import { fastLog } from './fast-log.js';
+import { marginals } from './marginals.js';
+import { writeRow } from './row-kernels.js';
+import type { Support } from './significant.js';
+
+/**
+ * Expected divergence of the posterior over sets from what it is now, and where
+ * the standing would be after each level of a pending finding.
+ *
+ * Source: Lindley 1956, Ann. Math. Statist. 27:986-1005.
+ */
+export function expectation(asked: Asked, support: Support, finding: number): Bounded<Expectation> {
+  const { panel, table, view, exponents } = asked.posterior;
+  const { shares, work, divided: after } = support;
+  const exponent = exponents.rows[finding]!;
+  const power = asked.power(exponent);
+  const levels: Expectation['levels'] = [];
+  let nats = 0;
+  let missed = 0;
+  for (let level = 0; level < panel.findings[finding]!.levels; level += 1) {
+    writeRow(work, support, asked.row(view, finding, level));
+    let p = 0;
+    let total = 0;
+    let logs = 0;
+    for (let index = 0; index < work.length; index += 1) {
+      const given = work[index]!;
+      const share = shares[index]!;
+      const raised = share * power.of(given);
+      after[index] = raised;
+      p += share * given;
+      total += raised;
+      logs += raised * fastLog(given);
+    }
+    for (let index = 0; index < after.length; index += 1) after[index]! /= total;
+    // KL(after ‖ now), after / now being P'^γ / total.
+    nats += p * ((exponent * logs) / total - Math.log(total));
+    missed = Math.max(missed, support.aside / total);
+    levels.push({ p, standing: marginals(table, support, after, after[0]!) });
+  }
+  return { value: { bits: Math.max(0, nats) / Math.LN2, levels }, missed };
+}
