@@ -43,7 +43,7 @@ export class DraftsService {
         number,
       };
       // A copy: what the database fills in would come back in its own types.
-      await work.em.insert(CaseFile, { ...fresh });
+      await work.em.insert(CaseFile, work.em.create(CaseFile, fresh));
       await work.em.insert(TeamMember, {
         caseId: fresh.id,
         personId: actor.id,

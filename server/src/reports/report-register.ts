@@ -47,7 +47,7 @@ export class ReportRegister {
         uploadedAt: this.clock.now(),
         removedAt: null,
       };
-      await work.em.insert(ReportRow, { ...row });
+      await work.em.insert(ReportRow, work.em.create(ReportRow, row));
       const line = { actorId: actor.id, action: 'report.added', sentence: 'added a report' };
       await this.changes.commit(work, file, 'reports', line);
       if (!wanted()) throw new Refusal('malformed', 'The upload was cancelled.');
