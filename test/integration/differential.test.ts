@@ -1,4 +1,4 @@
-import type { CaseList } from '@weighhouse/shared/contracts/cases';
+import type { CaseListItem } from '@weighhouse/shared/contracts/cases';
 import type { Differential, PanelView } from '@weighhouse/shared/contracts/differential';
 import type { ErrorBody } from '@weighhouse/shared/contracts/errors';
 import { assess } from '@weighhouse/shared/reasoning/assess';
@@ -31,7 +31,7 @@ afterAll(() => running.close());
 const panelFor = async (case_: JudgedCase, person: SeatedPerson): Promise<PanelView> =>
   (await person.agent.get(`/api/cases/${case_.id}/panel`).expect(200)).body as PanelView;
 const listed = async (case_: JudgedCase, person: SeatedPerson) =>
-  ((await person.agent.get('/api/cases?size=100').expect(200)).body as CaseList).items.find(
+  ((await person.agent.get('/api/cases?size=100').expect(200)).body as { items: CaseListItem[] }).items.find(
     (item) => item.id === case_.id,
   );
 const errorOf = (answer: { body: unknown }) => (answer.body as ErrorBody).error;
