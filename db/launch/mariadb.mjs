@@ -65,7 +65,8 @@ async function installDatabase(data, { account, logFile, processes }) {
   rmSync(draft, { recursive: true, force: true });
   makeOwnFolder(draft, account);
   const access = ['--auth-root-authentication-method=socket', '--skip-test-db', '--skip-name-resolve'];
-  const args = ['--no-defaults', ...asRoot(account), ...access, `--datadir=${draft}`];
+  // Forced: it would refuse on a machine whose own name cannot be looked up, which matters to nothing here.
+  const args = ['--no-defaults', '--force', ...asRoot(account), ...access, `--datadir=${draft}`];
   const code = await processes.run({
     name: 'mariadb-install-db',
     program,
