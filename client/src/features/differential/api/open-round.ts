@@ -7,7 +7,8 @@ import { refreshDifferential } from './refresh-differential';
 export function useOpenRound(caseId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: z.input<typeof openRoundSchema>) => post(`/api/cases/${caseId}/rounds`, roundSchema, body),
+    mutationFn: (body: z.input<typeof openRoundSchema>) =>
+      post(`/api/cases/${caseId}/rounds`, roundSchema, body),
     onSuccess: () => refreshDifferential(client, caseId),
   });
 }

@@ -2,7 +2,17 @@ import type { QueryClient } from '@tanstack/react-query';
 import type { Differential } from '@weighhouse/shared/contracts/differential';
 import { differentialKey } from './get-differential';
 
-const touched = ['case', 'candidates', 'findings', 'rounds', 'seals', 'settings', 'differential', 'trail', 'plan'];
+const touched = [
+  'case',
+  'candidates',
+  'findings',
+  'rounds',
+  'seals',
+  'settings',
+  'differential',
+  'trail',
+  'plan',
+];
 
 /** Reads again what a move on the ledger changes; resolves when the ledger itself is right again. */
 export function refreshDifferential(client: QueryClient, caseId: string): Promise<void> {

@@ -32,7 +32,9 @@ export function LedgerCards() {
           Previous
         </Button>
         <span className="small soft" role="status">
-          {at === 0 ? `Prior, before ${String(rows.length)} findings` : `Finding ${String(at)} of ${String(rows.length)}`}
+          {at === 0
+            ? `Prior, before ${String(rows.length)} findings`
+            : `Finding ${String(at)} of ${String(rows.length)}`}
         </span>
         <Button
           variant="outline"
@@ -88,13 +90,18 @@ function PriorCard() {
             <li key={column.id}>
               <span className="cell-list-name">{columnLabel(column)}</span>
               <span className="cell-list-figure figures" aria-hidden="true">
-                {view.share === null ? (view.sealed ? '' : '–') : <MovingFigure share={view.share} />}
+                {view.share === null ? view.sealed ? '' : '–' : <MovingFigure share={view.share} />}
               </span>
               <span className="aside-text">{priorSentence(view)}</span>
               {view.sealed ? (
                 <span className="ledger-sealed" aria-hidden="true" />
               ) : (
-                <ShareBar share={view.ownShare ? null : view.share} ticks={view.ticks} own={view.own} none={column.none} />
+                <ShareBar
+                  share={view.ownShare ? null : view.share}
+                  ticks={view.ticks}
+                  own={view.own}
+                  none={column.none}
+                />
               )}
               <span />
             </li>

@@ -1,14 +1,17 @@
 import type { JudgementDraftInput } from '@weighhouse/shared/contracts/judgements';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { offlineError } from '../../../lib/api-error';
-import { type Draft, emptyDraft, withText } from '../typing/draft';
-import { DraftStore, quietBeforeSending } from './draft-store';
+import { emptyDraft, withText } from '../typing/draft';
+import { DraftStore, quietBeforeSending, type TypedDraft } from './draft-store';
 
-const typed = (text: string): Draft => withText(emptyDraft(1), 'still', 0, 1, text);
+const typed = (text: string): TypedDraft => ({
+  draft: withText(emptyDraft(1), 'still', 0, 1, text),
+  wire: { target: 'f1', candidateSet: 1, exposure: null, typed: [[text]], reason: '' },
+});
 
 function surroundings() {
   const sent: JudgementDraftInput[] = [];
-  const memory = new Map<string, Draft>();
+  const memory = new Map<string, TypedDraft>();
   let offline = false;
   return {
     sent,
@@ -22,14 +25,7 @@ function surroundings() {
         sent.push(draft);
         return Promise.resolve({ ...draft, savedAt: '2026-12-01T09:00:00.000Z' });
       },
-      wire: (target: string, draft: Draft): JudgementDraftInput => ({
-        target,
-        candidateSet: 1,
-        exposure: null,
-        typed: [...draft.cells.values()].map((texts) => [...texts]),
-        reason: '',
-      }),
-      remember: (target: string, draft: Draft | null) => {
+      remember: (target: string, draft: TypedDraft | null) => {
         if (draft) memory.set(target, draft);
         else memory.delete(target);
       },
@@ -65,7 +61,8 @@ describe('the drafts', () => {
 
     world.goOffline(false);
     const loadedAgain = new DraftStore(world.around);
-    expect(loadedAgain.draft('f1')).toEqual(typed('65'));
+    loadedAgain.recall(['prior', 'f1']);
+    expect(loadedAgain.drafts()).toEqual(new Map([['f1', typed('65').draft]]));
     await vi.advanceTimersByTimeAsync(0);
     expect(world.sent.map((draft) => draft.typed)).toEqual([[['65']]]);
     expect(world.memory.has('f1')).toBe(false);
@@ -90,7 +87,7 @@ describe('the drafts', () => {
     store.forget('f1');
     await vi.advanceTimersByTimeAsync(10_000);
     expect(world.sent).toEqual([]);
-    expect(store.draft('f1')).toBeNull();
+    expect(store.drafts().size).toBe(0);
     expect(world.memory.size).toBe(0);
   });
 

@@ -3,17 +3,21 @@ import type { Saving } from '../../../components/save-state';
 import { isApiError } from '../../../lib/api-error';
 import type { Draft } from '../typing/draft';
 
-/** What the store needs from outside: the server, this browser's memory and a timer. */
-export interface DraftSurroundings {
-  send: (draft: JudgementDraftInput) => Promise<JudgementDraft>;
-  wire: (target: string, draft: Draft) => JudgementDraftInput;
-  /** Remembers in this browser what the server has not acknowledged; null forgets it. */
-  remember: (target: string, draft: Draft | null) => void;
-  recall: (target: string) => Draft | null;
+/** A draft with what the server is sent of it: the columns in the order they had while it was typed. */
+export interface TypedDraft {
+  draft: Draft;
+  wire: JudgementDraftInput;
 }
 
-interface Entry {
-  draft: Draft;
+/** What the store needs from outside: the server and this browser's memory. */
+export interface DraftSurroundings {
+  send: (draft: JudgementDraftInput) => Promise<JudgementDraft>;
+  /** Remembers in this browser what the server has not acknowledged; null forgets it. */
+  remember: (target: string, typed: TypedDraft | null) => void;
+  recall: (target: string) => TypedDraft | null;
+}
+
+interface Entry extends TypedDraft {
   saving: Saving;
   timer: ReturnType<typeof setTimeout> | undefined;
   sending: Promise<void> | undefined;
@@ -31,7 +35,7 @@ const pauseBeforeRetry = 5000;
 export class DraftStore {
   #entries = new Map<string, Entry>();
   #listeners = new Set<() => void>();
-  #version = 0;
+  #drafts: ReadonlyMap<string, Draft> = new Map();
 
   constructor(private readonly around: DraftSurroundings) {}
 
@@ -40,46 +44,50 @@ export class DraftStore {
     return () => this.#listeners.delete(listener);
   };
 
-  /** What was typed here, or before the page was loaded again and never acknowledged; null where nothing was. */
-  draft(target: string): Draft | null {
-    const entry = this.#entries.get(target);
-    if (entry) return entry.draft;
-    const recalled = this.around.recall(target);
-    if (!recalled) return null;
-    this.#entries.set(target, { draft: recalled, saving: { state: 'typing' }, timer: undefined, sending: undefined });
-    this.#later(target, 0);
-    return recalled;
-  }
+  /** Everything that is typed, by its target; another map after every change. */
+  drafts = (): ReadonlyMap<string, Draft> => this.#drafts;
 
   saving(target: string): Saving {
     return this.#entries.get(target)?.saving ?? clean;
   }
 
-  /** Rises with every change, for whoever watches all of it. */
-  version(): number {
-    return this.#version;
+  /** Takes up what was typed before the page was loaded again and never reached the server. */
+  recall(targets: readonly string[]): void {
+    for (const target of targets) {
+      const typed = this.#entries.has(target) ? null : this.around.recall(target);
+      if (!typed) continue;
+      this.#entries.set(target, {
+        ...typed,
+        saving: { state: 'typing' },
+        timer: undefined,
+        sending: undefined,
+      });
+      this.#later(target, 0);
+    }
+    this.#tell();
   }
 
-  /** The targets that were typed in on this page. */
-  targets(): string[] {
-    return [...this.#entries.keys()];
-  }
-
-  type(target: string, draft: Draft): void {
-    const entry = this.#entries.get(target);
-    clearTimeout(entry?.timer);
-    this.#entries.set(target, { draft, saving: { state: 'typing' }, timer: undefined, sending: entry?.sending });
-    this.around.remember(target, draft);
+  type(target: string, typed: TypedDraft): void {
+    const known = this.#entries.get(target);
+    clearTimeout(known?.timer);
+    this.#entries.set(target, {
+      ...typed,
+      saving: { state: 'typing' },
+      timer: undefined,
+      sending: known?.sending,
+    });
+    this.around.remember(target, typed);
     this.#later(target, quietBeforeSending);
     this.#tell();
   }
 
-  /** Waits for what is on its way and forgets the draft: it has been saved as a judgement, or thrown away. */
+  /** Waits for what is on its way, so that it cannot come back after the judgement was saved. */
   async settle(target: string): Promise<void> {
     clearTimeout(this.#entries.get(target)?.timer);
     await this.#entries.get(target)?.sending;
   }
 
+  /** The draft has been saved as a judgement. */
   forget(target: string): void {
     clearTimeout(this.#entries.get(target)?.timer);
     this.#entries.delete(target);
@@ -107,15 +115,16 @@ export class DraftStore {
   async #send(target: string): Promise<void> {
     const entry = this.#entries.get(target);
     if (!entry) return;
-    const { draft } = entry;
+    const { draft, wire } = entry;
+    const isLatest = () => this.#entries.get(target)?.draft === draft;
     this.#say(target, { state: 'saving' });
     try {
-      const kept = await this.around.send(this.around.wire(target, draft));
-      if (this.#entries.get(target)?.draft !== draft) return;
+      const kept = await this.around.send(wire);
+      if (!isLatest()) return;
       this.around.remember(target, null);
       this.#say(target, { state: 'saved', at: kept.savedAt });
     } catch (error) {
-      if (this.#entries.get(target)?.draft !== draft) return;
+      if (!isLatest()) return;
       const offline = isApiError(error, 'offline');
       this.#say(target, { state: 'failed', offline, error });
       if (offline) this.#later(target, pauseBeforeRetry);
@@ -129,7 +138,7 @@ export class DraftStore {
   }
 
   #tell(): void {
-    this.#version += 1;
+    this.#drafts = new Map([...this.#entries].map(([target, { draft }]) => [target, draft]));
     for (const listener of this.#listeners) listener();
   }
 }

@@ -1,37 +1,36 @@
 import type { Differential } from '@weighhouse/shared/contracts/differential';
-import { createContext, type ReactNode, use, useEffect, useRef, useState } from 'react';
+import { createContext, type ReactNode, use, useEffect, useState } from 'react';
 import { useLiveState } from '../../../lib/live';
 import { useSignedIn } from '../../people/api/get-me';
 import { keepDraft } from '../api/keep-draft';
-import { columnsOf } from '../model/columns';
-import { wireDraft } from '../typing/draft';
 import { DraftStore } from './draft-store';
 import { recallDraft, rememberDraft } from './kept-drafts';
 
 const DraftsContext = createContext<DraftStore | null>(null);
 
 /** Holds what is typed on this case while its differential is open. */
-export function DraftsProvider({ differential, children }: { differential: Differential; children: ReactNode }) {
-  const { caseId } = differential;
+export function DraftsProvider({
+  differential,
+  children,
+}: {
+  differential: Differential;
+  children: ReactNode;
+}) {
+  const { caseId, findings } = differential;
   const { id: personId } = useSignedIn();
-  const latest = useRef(differential);
-  useEffect(() => {
-    latest.current = differential;
-  }, [differential]);
   const [store] = useState(
     () =>
       new DraftStore({
         send: (draft) => keepDraft(caseId, draft),
-        wire: (target, draft) => {
-          const { candidates, candidateSet } = latest.current;
-          return wireDraft(target, { ...draft, candidateSet }, columnsOf(candidates));
-        },
-        remember: (target, draft) => {
-          rememberDraft(personId, caseId, target, draft);
+        remember: (target, typed) => {
+          rememberDraft(personId, caseId, target, typed);
         },
         recall: (target) => recallDraft(personId, caseId, target),
       }),
   );
+  useEffect(() => {
+    store.recall(['prior', ...findings.map((finding) => finding.id)]);
+  }, [store, findings]);
   const live = useLiveState();
   useEffect(() => {
     if (live === 'connected') store.sendAll();

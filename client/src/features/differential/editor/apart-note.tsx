@@ -31,7 +31,9 @@ function Reasons({ finding, keys }: { finding: Finding; keys: string[] }) {
   const { differential } = useLedger();
   const said = keys.flatMap((key) => {
     const person =
-      differential.mine?.key === key ? differential.mine : differential.others?.find((other) => other.key === key);
+      differential.mine?.key === key
+        ? differential.mine
+        : differential.others?.find((other) => other.key === key);
     const reason = person?.findings.find((row) => row.findingId === finding.id)?.reason ?? null;
     return reason === null || reason === '' ? [] : [{ key, reason }];
   });

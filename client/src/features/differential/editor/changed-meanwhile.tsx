@@ -9,15 +9,15 @@ export function ChangedMeanwhile({ error, draft }: { error: unknown; draft: Draf
   if (draft && draft.candidateSet !== differential.candidateSet)
     return (
       <p className="note" role="alert">
-        The candidates changed after you began to type. Your numbers stayed with their candidates, and a new candidate
-        is blank. Check them and save.
+        The candidates changed after you began to type. Your numbers stayed with their candidates, and a new
+        candidate is blank. Check them and save.
       </p>
     );
   if (isApiError(error, 'stale'))
     return (
       <p className="note" role="alert">
-        Your judgement was saved somewhere else meanwhile, or the candidates changed. What you typed is still here. Check
-        it and save again.
+        Your judgement was saved somewhere else meanwhile, or the candidates changed. What you typed is still
+        here. Check it and save again.
       </p>
     );
   return <FailureLine error={error} />;

@@ -44,4 +44,5 @@ export function LikelihoodLine({ column, text, onChange, others, fault }: Props)
   );
 }
 
-export const askedName = (column: Column) => (column.none ? 'none of these' : `${column.letter} ${column.name}`);
+export const askedName = (column: Column) =>
+  column.none ? 'none of these' : `${column.letter} ${column.name}`;

@@ -40,7 +40,9 @@ export function NumberTrack({ value, others, onChange }: Props) {
       {others.map((other, index) => (
         <span key={index} className="track-tick" style={{ left: `${String(other)}%` }} />
       ))}
-      {value !== null && <span className="mark-diamond track-diamond" style={{ left: `${String(value)}%` }} />}
+      {value !== null && (
+        <span className="mark-diamond track-diamond" style={{ left: `${String(value)}%` }} />
+      )}
     </div>
   );
 }

@@ -8,7 +8,9 @@ import type { useRowSaving } from './use-row-saving';
 export function OvertakenNote({ row }: { row: ReturnType<typeof useRowSaving> }) {
   return (
     <section className="both-texts" role="alert" aria-label="Saved somewhere else meanwhile">
-      <p className="failure-title">You saved this row somewhere else while you were typing here. Choose what stays.</p>
+      <p className="failure-title">
+        You saved this row somewhere else while you were typing here. Choose what stays.
+      </p>
       <div className="both-columns">
         <div>
           <h3>Typed here, not saved</h3>
@@ -35,7 +37,9 @@ function Texts({ draft, levels }: { draft: Draft; levels: number }) {
     <ul className="both-lines">
       {columns.map((column) => {
         const texts = textsOf(draft, column.id, levels > 2 ? levels : 1).map((text) => text.trim());
-        const words = texts.every((text) => text === '') ? 'blank' : texts.map((text) => text || 'blank').join(' / ');
+        const words = texts.every((text) => text === '')
+          ? 'blank'
+          : texts.map((text) => text || 'blank').join(' / ');
         return (
           <li key={column.id}>
             {columnLabel(column)}: <span className="figures">{words}</span>

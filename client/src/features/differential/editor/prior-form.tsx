@@ -28,7 +28,8 @@ export function PriorForm({ onSaved }: { onSaved?: () => void }) {
       }}
     >
       <p className="row-question">
-        Of 100 patients of this age and sex referred to such a panel, before the findings below: how many would have …
+        Of 100 patients of this age and sex referred to such a panel, before the findings below: how many
+        would have …
       </p>
       <div className="likelihoods">
         {columns.map((column) => {

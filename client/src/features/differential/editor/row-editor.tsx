@@ -17,7 +17,8 @@ export function RowEditor({ finding }: { finding: Finding }) {
   const { columns, differential } = useLedger();
   const row = useRowSaving(finding);
   const reasonId = useId();
-  const faultAt = (columnId: string | null) => row.faults.find((fault) => fault.columnId === columnId)?.message ?? null;
+  const faultAt = (columnId: string | null) =>
+    row.faults.find((fault) => fault.columnId === columnId)?.message ?? null;
   const blank = row.saved.cells.size === 0;
   return (
     <form
@@ -37,7 +38,9 @@ export function RowEditor({ finding }: { finding: Finding }) {
       />
       <h3 className="row-question">If it were each of these alone, how many of 100 would show this?</h3>
       <p className="small soft">
-        {finding.observed === 0 && row.levels === 2 ? 'It is absent here; still say how many would show it. ' : ''}
+        {finding.observed === 0 && row.levels === 2
+          ? 'It is absent here; still say how many would show it. '
+          : ''}
         Blank is no opinion.
       </p>
       <div className="likelihoods">

@@ -42,5 +42,13 @@ describe('movement in the grid', () => {
 });
 
 it('begins a number with a digit only', () => {
-  expect(['0', '7', 'a', 'F5', ' ', '-', '٣'].map(startsNumber)).toEqual(['0', '7', null, null, null, null, null]);
+  expect(['0', '7', 'a', 'F5', ' ', '-', '٣'].map(startsNumber)).toEqual([
+    true,
+    true,
+    false,
+    false,
+    false,
+    false,
+    false,
+  ]);
 });

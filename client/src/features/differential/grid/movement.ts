@@ -42,7 +42,7 @@ export function held(place: Place, size: GridSize): Place {
   return { row: inside(place.row, size.rows), column: inside(place.column, size.columns) };
 }
 
-/** The character with which typing a number begins, or null. */
-export function startsNumber(key: string): string | null {
-  return /^[0-9]$/.test(key) ? key : null;
+/** Whether a key begins typing a number. */
+export function startsNumber(key: string): boolean {
+  return /^[0-9]$/.test(key);
 }

@@ -3,8 +3,8 @@ import { type GridSize, held, moveInGrid, type Place, startsNumber } from './mov
 
 export interface GridActions {
   open: (place: Place) => void;
-  /** A digit was typed on a cell. @returns false where no number can be typed */
-  type: (place: Place, digit: string) => boolean;
+  /** A digit is typed on a cell; whatever has the focus afterwards receives it. */
+  type: (place: Place) => void;
   why: (place: Place) => void;
   escape: () => void;
   keys: () => void;
@@ -55,8 +55,10 @@ export function useGrid(size: GridSize, actions: GridActions) {
       return true;
     }
     if (event.ctrlKey) return false;
-    const digit = startsNumber(event.key);
-    if (digit !== null) return actions.type(place, digit);
+    if (startsNumber(event.key)) {
+      actions.type(place);
+      return false;
+    }
     const act = actionOf(event.key);
     if (act === null) return false;
     act(place);

@@ -11,7 +11,8 @@ export const FindingRow = memo(function FindingRow({ finding, row }: { finding: 
   const { columns, panel, unsaved } = useLedger();
   const format = useFormat();
   const selected =
-    (panel?.kind === 'row' && panel.findingId === finding.id) || (panel?.kind === 'why' && panel.target === finding.id);
+    (panel?.kind === 'row' && panel.findingId === finding.id) ||
+    (panel?.kind === 'why' && panel.target === finding.id);
   const state = finding.enteredInError ? 'error' : finding.observed === null ? 'pending' : 'observed';
   return (
     <tr className="ledger-row" data-state={state} aria-selected={selected}>

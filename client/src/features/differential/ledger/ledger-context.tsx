@@ -5,10 +5,9 @@ import { useUnsavedTargets } from '../drafts/use-draft';
 import { type Column, columnsOf } from '../model/columns';
 import { rowsInOrder } from '../model/rows';
 
-/** A place in the editor that typing in the ledger leads to, with the digit that was typed there. */
+/** A field in the editor that a cell of the ledger leads to. */
 export interface TypeAt {
   columnId: string;
-  digit: string | null;
 }
 
 /** What stands at the side. */

@@ -1,4 +1,5 @@
 import { type CSSProperties, useState } from 'react';
+import { flushSync } from 'react-dom';
 import { useGrid } from '../grid/use-grid';
 import type { Place } from '../grid/movement';
 import { rowGroups } from '../model/rows';
@@ -36,14 +37,15 @@ export function LedgerTable({ compact }: { compact: boolean }) {
   useFrameHeight(frame, scrolls);
 
   const openAt = (place: Place, at: TypeAt | null) => {
-    if (place.row === 0) open(canJudge ? { kind: 'prior', at } : { kind: 'why', target: 'prior', column: place.column - 1 });
+    if (place.row === 0)
+      open(canJudge ? { kind: 'prior', at } : { kind: 'why', target: 'prior', column: place.column - 1 });
     const finding = rows[place.row - 1];
     if (finding) open({ kind: 'row', findingId: finding.id, at });
     if (place.row === standingRow) open({ kind: 'pooled' });
   };
   const columnAt = (place: Place): TypeAt | null => {
     const column = columns[place.column - 1];
-    return column ? { columnId: column.id, digit: null } : null;
+    return column ? { columnId: column.id } : null;
   };
   const grid = useGrid(
     { rows: standingRow + 1, columns: columns.length + 1 },
@@ -51,12 +53,14 @@ export function LedgerTable({ compact }: { compact: boolean }) {
       open: (place) => {
         openAt(place, columnAt(place));
       },
-      type: (place, digit) => {
+      type: (place) => {
         const at = columnAt(place);
         const finding = rows[place.row - 1];
-        if (!canJudge || !at || place.row === standingRow || finding?.enteredInError) return false;
-        openAt(place, { ...at, digit });
-        return true;
+        if (!canJudge || !at || place.row === standingRow || finding?.enteredInError) return;
+        // At once: the field has to be there before the browser delivers the digit.
+        flushSync(() => {
+          openAt(place, at);
+        });
       },
       why: (place) => {
         const target = place.row === 0 ? 'prior' : rows[place.row - 1]?.id;

@@ -9,8 +9,8 @@ export function PriorAgain() {
   return (
     <div className="ledger-notice" role="status">
       <p>
-        The candidates have changed. Your prior belongs to the earlier set and is not pooled until you give it again. Your
-        likelihoods of the other columns stay.
+        The candidates have changed. Your prior belongs to the earlier set and is not pooled until you give it
+        again. Your likelihoods of the other columns stay.
       </p>
       <Button
         onClick={() => {

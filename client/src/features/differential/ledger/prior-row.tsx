@@ -25,7 +25,8 @@ export function PriorRow() {
 }
 
 function priorLine({ assessment, sealed, mine }: ReturnType<typeof useLedger>['differential']): string {
-  if (assessment) return assessment.priorGiven ? 'Starting shares, pooled' : 'Nobody gave a prior: all start alike';
+  if (assessment)
+    return assessment.priorGiven ? 'Starting shares, pooled' : 'Nobody gave a prior: all start alike';
   return sealed && mine ? 'Starting shares, yours' : 'Starting shares';
 }
 
@@ -42,7 +43,12 @@ function PriorCell({ column }: { column: Column }) {
       {view.sealed ? (
         <span className="ledger-sealed" aria-hidden="true" />
       ) : (
-        <ShareBar share={view.ownShare ? null : view.share} ticks={view.ticks} own={view.own} none={column.none} />
+        <ShareBar
+          share={view.ownShare ? null : view.share}
+          ticks={view.ticks}
+          own={view.own}
+          none={column.none}
+        />
       )}
     </td>
   );

@@ -37,9 +37,13 @@ describe('the announcer', () => {
   it('is silent at first, speaks at once, then not again for five seconds', () => {
     const announcer = new StandingAnnouncer();
     expect(announcer.hear(standings[0], columns, 0)).toBeNull();
-    expect(announcer.hear(standings[1], columns, 1000)).toEqual({ say: "Still's disease now 60 of 100, was 50" });
+    expect(announcer.hear(standings[1], columns, 1000)).toEqual({
+      say: "Still's disease now 60 of 100, was 50",
+    });
     expect(announcer.hear(standings[2], columns, 2000)).toEqual({ wait: 4000 });
-    expect(announcer.hear(standings[2], columns, 6000)).toEqual({ say: "Still's disease now 70 of 100, was 60" });
+    expect(announcer.hear(standings[2], columns, 6000)).toEqual({
+      say: "Still's disease now 70 of 100, was 60",
+    });
   });
 
   it('says nothing where the standing came back meanwhile', () => {

@@ -39,7 +39,11 @@ export class StandingAnnouncer {
    * @param now milliseconds
    * @returns a sentence to say now, or how long to wait before asking again (null: nothing to say)
    */
-  hear(standing: readonly number[], columns: readonly Column[], now: number): { say: string } | { wait: number } | null {
+  hear(
+    standing: readonly number[],
+    columns: readonly Column[],
+    now: number,
+  ): { say: string } | { wait: number } | null {
     if (this.#said?.length !== standing.length) {
       this.#said = standing;
       return null;

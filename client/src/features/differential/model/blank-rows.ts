@@ -22,7 +22,9 @@ export function blanksOf(mine: Mine, findings: readonly Finding[]): Blanks {
   const judged = inForce.length - rows.length;
   return {
     rows,
-    partly: inForce.filter((finding) => filled(finding) > 0 && filled(finding) < (given.get(finding.id)?.length ?? 0)),
+    partly: inForce.filter(
+      (finding) => filled(finding) > 0 && filled(finding) < (given.get(finding.id)?.length ?? 0),
+    ),
     judged,
     total: inForce.length,
     underHalf: judged * 2 < inForce.length,

@@ -1,5 +1,11 @@
 import { describe, expect, it } from 'vitest';
-import { makeAssessment, makeDifferential, makeFinding, makeMine, makeRow } from '../testing/make-differential';
+import {
+  makeAssessment,
+  makeDifferential,
+  makeFinding,
+  makeMine,
+  makeRow,
+} from '../testing/make-differential';
 import { cellView } from './cells';
 
 const fever = makeFinding({ id: 'fever' });
@@ -45,7 +51,10 @@ describe('a cell of the pool', () => {
 
   it('says where nobody judged it', () => {
     expect(cellView(pooled, fever, 1)).toMatchObject({ unjudged: 'cell', own: null, ticks: [-1] });
-    expect(cellView(pooled, makeFinding({ id: 'other' }), 0)).toMatchObject({ unjudged: 'row', figure: null });
+    expect(cellView(pooled, makeFinding({ id: 'other' }), 0)).toMatchObject({
+      unjudged: 'row',
+      figure: null,
+    });
   });
 
   it('names the likeliest level of a pending finding with more than two', () => {

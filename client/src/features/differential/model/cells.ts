@@ -39,9 +39,19 @@ export function cellView(differential: Differential, finding: Finding, column: n
   const { assessment, mine } = differential;
   if (finding.enteredInError) return { ...empty, unjudged: 'no' };
   if (!assessment) {
-    const figure = ownFigure(mine?.findings.find((row) => row.findingId === finding.id), finding, column);
+    const figure = ownFigure(
+      mine?.findings.find((row) => row.findingId === finding.id),
+      finding,
+      column,
+    );
     const sealed = differential.sealed;
-    return { ...empty, figure, ownFigure: figure !== null, sealed, unjudged: sealed || figure ? 'no' : 'row' };
+    return {
+      ...empty,
+      figure,
+      ownFigure: figure !== null,
+      sealed,
+      unjudged: sealed || figure ? 'no' : 'row',
+    };
   }
   return pooledCell(assessment, mine?.key ?? null, finding, column);
 }
@@ -56,7 +66,12 @@ const empty: CellView = {
   unjudged: 'row',
 };
 
-function pooledCell(assessment: AssessmentView, ownKey: string | null, finding: Finding, column: number): CellView {
+function pooledCell(
+  assessment: AssessmentView,
+  ownKey: string | null,
+  finding: Finding,
+  column: number,
+): CellView {
   const levels = assessment.pooledCells[finding.id]?.[column];
   if (!levels) return empty;
   const row = assessment.rows[finding.id];

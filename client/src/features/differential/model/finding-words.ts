@@ -12,7 +12,10 @@ export function levelCount(finding: Pick<Finding, 'levelLabels'>): number {
 
 /** The name of a level as it stands in a sentence: "absent", "present", or the label that was given. */
 export function levelName(finding: Pick<Finding, 'levelLabels'>, level: number): string {
-  return finding.levelLabels[level] ?? (level === 0 ? 'absent' : level === 1 ? 'present' : `level ${String(level + 1)}`);
+  return (
+    finding.levelLabels[level] ??
+    (level === 0 ? 'absent' : level === 1 ? 'present' : `level ${String(level + 1)}`)
+  );
 }
 
 /** What is known of a finding, as the line under its title begins. */
@@ -40,7 +43,8 @@ export function sourceWords(finding: Finding): string | null {
 export function effortWords(finding: Finding): string[] {
   const words: string[] = [];
   if (finding.cost !== null) words.push(`cost ${finding.cost.toLocaleString('en-GB')}`);
-  if (finding.waitDays !== null) words.push(`wait ${String(finding.waitDays)} ${finding.waitDays === 1 ? 'day' : 'days'}`);
+  if (finding.waitDays !== null)
+    words.push(`wait ${String(finding.waitDays)} ${finding.waitDays === 1 ? 'day' : 'days'}`);
   if (finding.burden !== null) words.push(`burden ${String(finding.burden)} of 3`);
   return words;
 }

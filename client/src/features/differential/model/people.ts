@@ -19,7 +19,9 @@ export function voicesOf(differential: Differential): Voice[] {
     you: false,
   }));
   const { mine } = differential;
-  return mine ? [{ key: mine.key, name: 'You', specialty: null, weight: null, you: true }, ...others] : others;
+  return mine
+    ? [{ key: mine.key, name: 'You', specialty: null, weight: null, you: true }, ...others]
+    : others;
 }
 
 export function voiceName(differential: Differential, key: string): string {

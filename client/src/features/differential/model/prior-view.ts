@@ -27,7 +27,8 @@ export function priorView(differential: Differential, column: number): PriorView
 
 export function priorSentence(view: PriorView): string {
   const words = view.share === null ? null : naturalFrequency(view.share).words;
-  if (view.sealed) return `${words === null ? 'No share of yours.' : `You: ${words}.`} The others are sealed.`;
+  if (view.sealed)
+    return `${words === null ? 'No share of yours.' : `You: ${words}.`} The others are sealed.`;
   if (words === null) return 'No share given yet.';
   const own = view.own === null ? '' : ` You: ${naturalFrequency(view.own).words}.`;
   return `${view.ownShare ? 'You: ' : ''}${words}.${own}`;

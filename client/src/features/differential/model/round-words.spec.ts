@@ -37,7 +37,9 @@ it('wants the deadline past, two in and a reason below the quorum', () => {
 });
 
 it('says what is missing', () => {
-  expect(unsealHindrance(roundCount(makeRound(2), 3, now), false)).toBe('Unsealing needs 1 more contributor handed in.');
+  expect(unsealHindrance(roundCount(makeRound(2), 3, now), false)).toBe(
+    'Unsealing needs 1 more contributor handed in.',
+  );
   expect(unsealHindrance(roundCount(makeRound(1, past), 3, now), true)).toBe(
     'The deadline is past, but fewer than two have handed in.',
   );

@@ -31,7 +31,10 @@ export function roundTitle(round: Round): string {
 }
 
 /** What stands in the way of unsealing, in words for the chair. */
-export function unsealHindrance({ in: inNow, quorum, deadlinePast }: RoundCount, hasDeadline: boolean): string {
+export function unsealHindrance(
+  { in: inNow, quorum, deadlinePast }: RoundCount,
+  hasDeadline: boolean,
+): string {
   const missing = counted(Math.max(0, quorum - inNow), 'more contributor');
   if (!hasDeadline) return `Unsealing needs ${missing} handed in.`;
   if (!deadlinePast) return `Unsealing needs ${missing} handed in, or the deadline past and two in.`;

@@ -18,7 +18,10 @@ export function standingView(differential: Differential, column: number): Standi
     const own = mine?.standing?.[column] ?? null;
     return { share: null, range: null, before: null, ticks: [], own, sealed };
   }
-  const alone = Object.entries(assessment.own).map(([key, shares]) => ({ key, share: shares[column] ?? null }));
+  const alone = Object.entries(assessment.own).map(([key, shares]) => ({
+    key,
+    share: shares[column] ?? null,
+  }));
   return {
     share: assessment.standing[column] ?? null,
     range: assessment.range[column] ?? null,
@@ -46,12 +49,16 @@ export function standingSentence(view: StandingView): string {
 export function standingLines(differential: Differential): string[] {
   const { assessment, sealed, shownRound, mine, round } = differential;
   if (!assessment) {
-    if (sealed) return ['Sealed until the chair unseals the round.', ...(mine ? ['Diamond: you alone.'] : [])];
+    if (sealed)
+      return ['Sealed until the chair unseals the round.', ...(mine ? ['Diamond: you alone.'] : [])];
     return ['Nothing judged yet.'];
   }
   const people = Object.keys(assessment.own).length;
   const lines = [`Pooled from ${counted(people, 'contributor')}.`];
-  if (shownRound && sealed) lines.push(`As round ${String(shownRound.number)} left it: round ${String(round?.number ?? 0)} is sealed.`);
+  if (shownRound && sealed)
+    lines.push(
+      `As round ${String(shownRound.number)} left it: round ${String(round?.number ?? 0)} is sealed.`,
+    );
   if (shownRound && shownRound.notIn.length > 0) lines.push(`Not in: ${listed(shownRound.notIn)}.`);
   return lines;
 }

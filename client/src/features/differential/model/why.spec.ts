@@ -3,13 +3,28 @@ import { makeDifferential, makeFinding, makeMine, makeOther, makeRow } from '../
 import { whyCell, whyPrior } from './why';
 
 const fever = makeFinding({ id: 'fever' });
-const prior = { candidateSet: 1, version: 1, outOf100: [20, 80], reason: 'why', savedAt: '2026-12-01T09:00:00.000Z' };
+const prior = {
+  candidateSet: 1,
+  version: 1,
+  outOf100: [20, 80],
+  reason: 'why',
+  savedAt: '2026-12-01T09:00:00.000Z',
+};
 const differential = makeDifferential({
   findings: [fever],
-  mine: makeMine({ findings: [{ ...makeRow('fever', [65, null]), exposure: 'sometimes' }], prior, priorInForce: false }),
+  mine: makeMine({
+    findings: [{ ...makeRow('fever', [65, null]), exposure: 'sometimes' }],
+    prior,
+    priorInForce: false,
+  }),
   others: [
     makeOther('blank', { weight: 2 }),
-    makeOther('dr', { weight: 2, findings: [{ ...makeRow('fever', [40, 10]), exposure: 'seldom' }], prior, priorInForce: true }),
+    makeOther('dr', {
+      weight: 2,
+      findings: [{ ...makeRow('fever', [40, 10]), exposure: 'seldom' }],
+      prior,
+      priorInForce: true,
+    }),
   ],
 });
 const weightOf = (voice: { you: boolean; weight: number | null }) => (voice.you ? 1 : voice.weight);

@@ -19,7 +19,12 @@ export interface WhyLine {
 }
 
 /** Who said what about a cell, and how much each counts, those with a number first. */
-export function whyCell(differential: Differential, finding: Finding, column: number, weightOf: WeightOf): WhyLine[] {
+export function whyCell(
+  differential: Differential,
+  finding: Finding,
+  column: number,
+  weightOf: WeightOf,
+): WhyLine[] {
   const lines = voicesOf(differential).map((voice) => {
     const row = rowOf(differential, voice, finding.id);
     const given = row?.outOf100[column] ?? null;

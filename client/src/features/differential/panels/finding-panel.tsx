@@ -1,5 +1,5 @@
 import { useSearchParams } from 'react-router-dom';
-import { FindingForm } from '../../findings/components/finding-form';
+import { FindingForm } from '../evidence/finding-form';
 import { useLedger } from '../ledger/ledger-context';
 import { SideHeading } from './side-panel';
 

@@ -1,4 +1,4 @@
-import { GroupsForm } from '../../findings/components/groups-form';
+import { GroupsForm } from '../evidence/groups-form';
 import { useLedger } from '../ledger/ledger-context';
 import { useChangeSettings } from '../api/change-settings';
 import { SideHeading } from './side-panel';
@@ -11,8 +11,9 @@ export function GroupsPanel() {
     <>
       <SideHeading>Findings that overlap</SideHeading>
       <p className="side-about">
-        Findings that one mechanism explains would be counted several times over. Overlap says how far: 0 for separate
-        mechanisms, 100 for the same finding twice. A finding joins a group where the finding is changed.
+        Findings that one mechanism explains would be counted several times over. Overlap says how far: 0 for
+        separate mechanisms, 100 for the same finding twice. A finding joins a group where the finding is
+        changed.
       </p>
       {may('settings.change') ? (
         <GroupsForm

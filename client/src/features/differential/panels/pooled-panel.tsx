@@ -17,7 +17,9 @@ export function PooledPanel() {
       <>
         <SideHeading>How it is pooled</SideHeading>
         <p className="soft">
-          {sealed ? 'The round is sealed. Nothing is pooled before the chair unseals it.' : 'Nothing is judged yet.'}
+          {sealed
+            ? 'The round is sealed. Nothing is pooled before the chair unseals it.'
+            : 'Nothing is judged yet.'}
         </p>
         <Method method="weighhouse/1" tempering={settings.tempering} />
       </>
@@ -37,16 +39,22 @@ export function PooledPanel() {
       <CountedLess />
       <h3 className="side-sub">Two ways to add up, and the range</h3>
       <p className="small soft">
-        The average of where each stands alone keeps dissent visible. The range runs over leaving out each contributor
-        and each finding, and over stronger and no tempering.
+        The average of where each stands alone keeps dissent visible. The range runs over leaving out each
+        contributor and each finding, and over stronger and no tempering.
       </p>
       <table className="why-table">
         <thead>
           <tr>
             <th scope="col">Of 100</th>
-            <th scope="col" className="why-number">Pool</th>
-            <th scope="col" className="why-number">Average</th>
-            <th scope="col" className="why-number">Range</th>
+            <th scope="col" className="why-number">
+              Pool
+            </th>
+            <th scope="col" className="why-number">
+              Average
+            </th>
+            <th scope="col" className="why-number">
+              Range
+            </th>
           </tr>
         </thead>
         <tbody>
@@ -74,10 +82,11 @@ const whole = (share: number | undefined) => (share === undefined ? '–' : natu
 function Method({ method, tempering }: { method: string; tempering: number }) {
   return (
     <p className="side-about">
-      Logarithmic opinion pool, method <span className="figures">{method}</span>: priors and likelihoods of all
-      contributors are averaged by weight on the scale of log odds, then every finding is counted one after the other.
-      Every finding counts {Math.round(tempering * 100)} of 100 of its full strength (tempering), because findings in one
-      patient overlap more than anyone can list. One cause is assumed: the candidates exclude each other.
+      Logarithmic opinion pool, method <span className="figures">{method}</span>: priors and likelihoods of
+      all contributors are averaged by weight on the scale of log odds, then every finding is counted one
+      after the other. Every finding counts {Math.round(tempering * 100)} of 100 of its full strength
+      (tempering), because findings in one patient overlap more than anyone can list. One cause is assumed:
+      the candidates exclude each other.
     </p>
   );
 }
@@ -94,15 +103,22 @@ function Weights() {
           <tr>
             <th scope="col">Who</th>
             <th scope="col">Prior</th>
-            <th scope="col" className="why-number">Rows</th>
-            <th scope="col" className="why-number">Weight</th>
+            <th scope="col" className="why-number">
+              Rows
+            </th>
+            <th scope="col" className="why-number">
+              Weight
+            </th>
           </tr>
         </thead>
         <tbody>
           {voices.map((voice) => {
-            const person = voice.you ? differential.mine : differential.others?.find((other) => other.key === voice.key);
+            const person = voice.you
+              ? differential.mine
+              : differential.others?.find((other) => other.key === voice.key);
             const reason = memberOf(voice)?.reason;
-            const judged = person?.findings.filter((row) => row.outOf100.some((cell) => cell !== null)).length ?? 0;
+            const judged =
+              person?.findings.filter((row) => row.outOf100.some((cell) => cell !== null)).length ?? 0;
             return (
               <tr key={voice.key} data-you={voice.you || undefined}>
                 <th scope="row">
@@ -118,8 +134,8 @@ function Weights() {
         </tbody>
       </table>
       <p className="small soft">
-        On a row a judgement counts weight times exposure: seldom a quarter, sometimes half, often in full. A blank is
-        no opinion and has no weight.
+        On a row a judgement counts weight times exposure: seldom a quarter, sometimes half, often in full. A
+        blank is no opinion and has no weight.
       </p>
     </>
   );

@@ -16,15 +16,18 @@ export function PriorPanel() {
       <SideHeading>Before any finding</SideHeading>
       {mine?.prior && !mine.priorInForce && (
         <p className="note">
-          The candidates have changed since you gave your prior. Until you give it again it is not pooled. Your
-          likelihoods of the other columns stay.
+          The candidates have changed since you gave your prior. Until you give it again it is not pooled.
+          Your likelihoods of the other columns stay.
         </p>
       )}
       {given && (
         <p className="soft">
           {saved ? 'Saved. ' : ''}You gave:{' '}
           {columns
-            .map((column) => `${columnLabel(column)} ${naturalFrequency((given.outOf100[column.index] ?? 0) / 100).words}`)
+            .map(
+              (column) =>
+                `${columnLabel(column)} ${naturalFrequency((given.outOf100[column.index] ?? 0) / 100).words}`,
+            )
             .join(', ')}
           . To change it, give all shares anew.
         </p>

@@ -25,9 +25,12 @@ export function RoundPanel() {
     <>
       <SideHeading>{roundTitle(round)}</SideHeading>
       <p className="side-about">
-        Opened {format.moment(round.openedAt)}.{round.deadline !== null && ` Hand in by ${format.moment(round.deadline)}.`}
+        Opened {format.moment(round.openedAt)}.
+        {round.deadline !== null && ` Hand in by ${format.moment(round.deadline)}.`}
         {round.unsealedAt !== null && ` Unsealed ${format.moment(round.unsealedAt)}.`}
-        {round.unsealReason !== null && round.unsealReason !== '' && ` Below the quorum, because: ${round.unsealReason}.`}
+        {round.unsealReason !== null &&
+          round.unsealReason !== '' &&
+          ` Below the quorum, because: ${round.unsealReason}.`}
         {round.closedAt !== null && ` Closed ${format.moment(round.closedAt)}.`}
       </p>
       <LeftToJudge />

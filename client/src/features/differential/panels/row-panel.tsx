@@ -4,7 +4,7 @@ import { Link } from 'react-router-dom';
 import { useFormat } from '../../../lib/use-format';
 import { ApartNote } from '../editor/apart-note';
 import { RowEditor } from '../editor/row-editor';
-import { EnteredInErrorButton } from '../../findings/components/entered-in-error-button';
+import { EnteredInErrorButton } from '../evidence/entered-in-error-button';
 import { useLedger } from '../ledger/ledger-context';
 import { dayWords } from '../model/day-words';
 import { effortWords, reliabilityWord, sourceWords, stateWords } from '../model/finding-words';
@@ -28,7 +28,9 @@ export function RowPanel({ findingId }: { findingId: string }) {
       <About finding={finding} />
       {canJudge && !finding.enteredInError ? <RowEditor finding={finding} /> : <CellList finding={finding} />}
       {!canJudge && differential.sealed && differential.mine?.handedInAt && (
-        <p className="note">You handed in. Your numbers stay as they are until the chair unseals the round.</p>
+        <p className="note">
+          You handed in. Your numbers stay as they are until the chair unseals the round.
+        </p>
       )}
       <ApartNote finding={finding} />
       <div className="actions side-actions">
@@ -65,7 +67,11 @@ function About({ finding }: { finding: Finding }) {
       ? null
       : `/cases/${differential.caseId}/reports?report=${source.reportId}${source.page === null ? '' : `&page=${String(source.page)}`}`;
   const report =
-    source?.fileName == null ? null : source.page === null ? source.fileName : `${source.fileName}, page ${String(source.page)}`;
+    source?.fileName == null
+      ? null
+      : source.page === null
+        ? source.fileName
+        : `${source.fileName}, page ${String(source.page)}`;
   return (
     <div className="side-about">
       <p>

@@ -20,13 +20,17 @@ export function SealsPanel() {
     <>
       <SideHeading>Verify seals</SideHeading>
       <p className="side-about">
-        A seal is the SHA-256 digest of 32 random bytes and the judgement as it was handed in. The digest was shown at
-        hand-in, the bytes at unsealing; this browser computes the digest again and compares.
+        A seal is the SHA-256 digest of 32 random bytes and the judgement as it was handed in. The digest was
+        shown at hand-in, the bytes at unsealing; this browser computes the digest again and compares.
       </p>
       {seals.data && <Checked seals={seals.data.items} />}
       {seals.isPending && <SkeletonText lines={4} />}
       {seals.error && !seals.data && (
-        <Failure error={seals.error} what="The seals could not be loaded." retry={() => void seals.refetch()} />
+        <Failure
+          error={seals.error}
+          what="The seals could not be loaded."
+          retry={() => void seals.refetch()}
+        />
       )}
     </>
   );
@@ -45,9 +49,11 @@ function Checked({ seals }: { seals: Seal[] }) {
         {checked && resultWords(checked)}
       </p>
       <ul className="members">
-        {(checked ?? seals.map((seal) => ({ seal, verdict: null, seen: null }))).map(({ seal, verdict, seen }) => (
-          <SealLine key={seal.roundId + seal.person.id} seal={seal} verdict={verdict} seen={seen} />
-        ))}
+        {(checked ?? seals.map((seal) => ({ seal, verdict: null, seen: null }))).map(
+          ({ seal, verdict, seen }) => (
+            <SealLine key={seal.roundId + seal.person.id} seal={seal} verdict={verdict} seen={seen} />
+          ),
+        )}
       </ul>
     </>
   );
@@ -57,9 +63,11 @@ function resultWords(checked: CheckedSeal[]): string {
   const bad = checked.filter(({ verdict, seen }) => verdict === 'broken' || seen === 'other').length;
   const open = checked.filter(({ verdict }) => verdict === 'closed').length;
   const held = checked.length - bad - open;
-  const parts = [bad > 0 && `${counted(bad, 'seal does', 'seals do')} not hold`, held > 0 && `${counted(held, 'seal holds', 'seals hold')}`];
-  if (open > 0) parts.push(`${counted(open, 'seal is', 'seals are')} still closed`);
-  return `${parts.filter(Boolean).join(', ')}.`;
+  const parts: string[] = [];
+  if (bad > 0) parts.push(counted(bad, 'seal does not hold', 'seals do not hold'));
+  if (held > 0) parts.push(counted(held, 'seal holds', 'seals hold'));
+  if (open > 0) parts.push(counted(open, 'seal is still closed', 'seals are still closed'));
+  return `${parts.join(', ')}.`;
 }
 
 type LineProps = { seal: Seal; verdict: CheckedSeal['verdict'] | null; seen: CheckedSeal['seen'] | null };

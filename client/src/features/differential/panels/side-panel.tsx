@@ -1,5 +1,5 @@
-import { type ReactNode, useEffect, useRef } from 'react';
-import { CandidatesPanel } from '../../findings/components/candidates-panel';
+import { type ReactNode, type RefObject, useLayoutEffect, useRef } from 'react';
+import { CandidatesPanel } from '../evidence/candidates-panel';
 import { type Panel, useLedger } from '../ledger/ledger-context';
 import { FindingPanel } from './finding-panel';
 import { GroupsPanel } from './groups-panel';
@@ -71,11 +71,11 @@ function contents(panel: Panel | null): ReactNode {
 }
 
 /**
- * Moves the focus to where the person wants to go on: the field of the cell they typed or opened, with the digit
- * they typed, else the heading.
+ * Moves the focus to where the person wants to go on: the field of the cell that they opened, else the heading. Before
+ * the browser goes on with the key that opened it, so that a digit typed on the cell arrives in the field.
  */
-function useFocusOnOpen(box: React.RefObject<HTMLElement | null>, panel: Panel | null): void {
-  useEffect(() => {
+function useFocusOnOpen(box: RefObject<HTMLElement | null>, panel: Panel | null): void {
+  useLayoutEffect(() => {
     if (!panel || !box.current) return;
     const at = panel.kind === 'row' || panel.kind === 'prior' ? panel.at : null;
     const field = at && box.current.querySelector<HTMLInputElement>(`[data-field="${at.columnId}"]`);
@@ -84,17 +84,8 @@ function useFocusOnOpen(box: React.RefObject<HTMLElement | null>, panel: Panel |
       return;
     }
     field.focus();
-    if (at.digit === null) field.select();
-    else typeDigit(field, at.digit);
+    field.select();
   }, [box, panel]);
-}
-
-/** As if the digit had been typed in the field: what stood there is replaced, and the form hears of it. */
-function typeDigit(field: HTMLInputElement, digit: string): void {
-  const setter = Object.getOwnPropertyDescriptor(HTMLInputElement.prototype, 'value')?.set;
-  setter?.call(field, digit);
-  field.dispatchEvent(new Event('input', { bubbles: true }));
-  field.setSelectionRange(digit.length, digit.length);
 }
 
 /** The heading of what stands at the side; it takes the focus when it is opened. */

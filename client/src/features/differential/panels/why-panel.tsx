@@ -49,7 +49,8 @@ export function WhyPanel({ target, column: index }: { target: string; column: nu
         Why {columnLabel(column)}, {finding.title}
       </SideHeading>
       <p className="side-about">
-        {stateWords(finding)}. {cell.figure ? `Pooled: ${figureWords(finding, cell.figure)}.` : 'Nobody judged this row.'}{' '}
+        {stateWords(finding)}.{' '}
+        {cell.figure ? `Pooled: ${figureWords(finding, cell.figure)}.` : 'Nobody judged this row.'}{' '}
         {cell.unjudged === 'cell' &&
           'Nobody judged this cell: it takes the average of the judged ones of its row, so that it counts neither way among them. '}
         {cell.decibans !== null &&
@@ -64,7 +65,11 @@ export function WhyPanel({ target, column: index }: { target: string; column: nu
   );
 }
 
-const exposureWords = { seldom: 'seldom, counts a quarter', sometimes: 'sometimes, counts half', often: 'often, counts in full' };
+const exposureWords = {
+  seldom: 'seldom, counts a quarter',
+  sometimes: 'sometimes, counts half',
+  often: 'often, counts in full',
+};
 
 function WhyTable({ lines, shown }: { lines: WhyLine[]; shown: string }) {
   return (
@@ -85,12 +90,22 @@ function WhyTable({ lines, shown }: { lines: WhyLine[]; shown: string }) {
           <tr key={line.voice.key} data-you={line.voice.you || undefined}>
             <th scope="row">
               {line.voice.name}
-              {line.voice.specialty !== null && line.voice.specialty !== '' && <span className="soft">, {line.voice.specialty}</span>}
-              {line.exposure !== null && <span className="small soft why-more">Sees it {exposureWords[line.exposure]}</span>}
-              {line.reason !== null && line.reason !== '' && <span className="small why-more">“{line.reason}”</span>}
+              {line.voice.specialty !== null && line.voice.specialty !== '' && (
+                <span className="soft">, {line.voice.specialty}</span>
+              )}
+              {line.exposure !== null && (
+                <span className="small soft why-more">Sees it {exposureWords[line.exposure]}</span>
+              )}
+              {line.reason !== null && line.reason !== '' && (
+                <span className="small why-more">“{line.reason}”</span>
+              )}
             </th>
-            <td className="figures why-number">{line.share === null ? 'blank' : naturalFrequency(line.share).outOf100}</td>
-            <td className="figures why-number">{line.counts === null ? '–' : line.counts.toFixed(2).replace(/\.?0+$/, '')}</td>
+            <td className="figures why-number">
+              {line.share === null ? 'blank' : naturalFrequency(line.share).outOf100}
+            </td>
+            <td className="figures why-number">
+              {line.counts === null ? '–' : line.counts.toFixed(2).replace(/\.?0+$/, '')}
+            </td>
           </tr>
         ))}
       </tbody>

@@ -11,7 +11,9 @@ export function PriorFirst() {
       <h2 className="prior-first-title">First, before the findings: your prior</h2>
       <p className="soft prose">
         {round?.kind === 'sealed'
-          ? 'Round ' + String(round.number) + ' is sealed: nobody sees your numbers before the chair unseals it. '
+          ? 'Round ' +
+            String(round.number) +
+            ' is sealed: nobody sees your numbers before the chair unseals it. '
           : ''}
         The findings are hidden until your prior is saved, so that they are not counted twice.
       </p>
@@ -26,7 +28,9 @@ export function PriorFirst() {
                 <li key={column.id}>
                   {column.none ? 'None of these' : `${column.letter} ${column.name}`}
                   {column.mustNotMiss && <span className="small"> (must not miss)</span>}
-                  {candidate && candidate.detail !== '' && <span className="small soft why-more">{candidate.detail}</span>}
+                  {candidate && candidate.detail !== '' && (
+                    <span className="small soft why-more">{candidate.detail}</span>
+                  )}
                   {column.none && <span className="small soft why-more">Whatever else it may be.</span>}
                 </li>
               );

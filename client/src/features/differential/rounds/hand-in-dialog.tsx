@@ -33,7 +33,11 @@ export function HandInDialog({ open, onOpenChange, round, mine }: Props) {
   );
 }
 
-function HandInForm({ round, mine, onClose }: Omit<Props, 'open' | 'onOpenChange'> & { onClose: () => void }) {
+function HandInForm({
+  round,
+  mine,
+  onClose,
+}: Omit<Props, 'open' | 'onOpenChange'> & { onClose: () => void }) {
   const { differential } = useLedger();
   const handIn = useHandIn(differential.caseId);
   const [noMore, setNoMore] = useState(false);
@@ -95,14 +99,25 @@ function Blanks() {
   const blanks = blanksOf(mine, differential.findings);
   const typed = rows.filter((row) => unsaved.has(row.id)).map((row) => row.title);
   const lists = [
-    { title: `${counted(blanks.rows.length, 'row is', 'rows are')} blank`, items: blanks.rows.map((row) => row.title) },
-    { title: `${counted(blanks.partly.length, 'row is', 'rows are')} partly blank`, items: blanks.partly.map((row) => row.title) },
-    { title: `${counted(typed.length, 'row is', 'rows are')} typed and not saved: that is not handed in`, items: typed },
+    {
+      title: `${counted(blanks.rows.length, 'row is', 'rows are')} blank`,
+      items: blanks.rows.map((row) => row.title),
+    },
+    {
+      title: `${counted(blanks.partly.length, 'row is', 'rows are')} partly blank`,
+      items: blanks.partly.map((row) => row.title),
+    },
+    {
+      title: `${counted(typed.length, 'row is', 'rows are')} typed and not saved: that is not handed in`,
+      items: typed,
+    },
   ].filter((list) => list.items.length > 0);
   return (
     <div className="blanks">
       {blanks.priorMissing && <p>You have not given a prior for the candidates in force.</p>}
-      {lists.length === 0 && !blanks.priorMissing && <p>Nothing is blank. All {counted(blanks.total, 'row')} are judged.</p>}
+      {lists.length === 0 && !blanks.priorMissing && (
+        <p>Nothing is blank. All {counted(blanks.total, 'row')} are judged.</p>
+      )}
       {lists.map((list) => (
         <div key={list.title}>
           <h2>{list.title}</h2>

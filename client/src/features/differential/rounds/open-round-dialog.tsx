@@ -1,6 +1,6 @@
 import { Button, Dialog, TextField } from '@radix-ui/themes';
 import type { RoundKind } from '@weighhouse/shared/contracts/rounds';
-import { type FormEvent, useState } from 'react';
+import { type SyntheticEvent, useState } from 'react';
 import { FailureLine } from '../../../components/failure';
 import { FieldGroup, FormField } from '../../../components/form-field';
 import { isApiError } from '../../../lib/api-error';
@@ -41,10 +41,13 @@ function OpenRoundForm({ onDone }: { onDone: () => void }) {
   const [kind, setKind] = useState<RoundKind | null>(first ? 'sealed' : null);
   const [deadline, setDeadline] = useState('');
   const faults = isApiError(opening.error) ? opening.error.fields : [];
-  const submit = (event: FormEvent) => {
+  const submit = (event: SyntheticEvent) => {
     event.preventDefault();
     if (!kind) return;
-    opening.mutate({ kind, deadline: deadline === '' ? null : format.fromField(deadline) }, { onSuccess: onDone });
+    opening.mutate(
+      { kind, deadline: deadline === '' ? null : format.fromField(deadline) },
+      { onSuccess: onDone },
+    );
   };
   return (
     <form onSubmit={submit}>
@@ -67,7 +70,13 @@ function OpenRoundForm({ onDone }: { onDone: () => void }) {
           ))}
         {first && <p className="field-hint">The first round of a case is always sealed.</p>}
       </FieldGroup>
-      <FormField label="Hand in by" path="deadline" faults={faults} optional hint={`In the time zone ${format.timeZone}.`}>
+      <FormField
+        label="Hand in by"
+        path="deadline"
+        faults={faults}
+        optional
+        hint={`In the time zone ${format.timeZone}.`}
+      >
         {(control) => (
           <TextField.Root
             {...control}

@@ -51,9 +51,18 @@ export function RoundBar({ children }: { children?: ReactNode }) {
           {differential.assessment ? 'How it was pooled' : 'How it is pooled'}
         </Button>
         {round && openNow && may('round.close') && button('close', 'Close the round', false)}
-        {round && openNow && round.kind === 'sealed' && may('round.unseal') && button('unseal', 'Unseal', count?.quorumIn === true)}
+        {round &&
+          openNow &&
+          round.kind === 'sealed' &&
+          may('round.unseal') &&
+          button('unseal', 'Unseal', count?.quorumIn === true)}
         {may('round.open') && button('open', 'Open a round', true)}
-        {round && openNow && mine && may('judgement.handIn') && mine.handedInAt === null && button('handIn', 'Hand in', true)}
+        {round &&
+          openNow &&
+          mine &&
+          may('judgement.handIn') &&
+          mine.handedInAt === null &&
+          button('handIn', 'Hand in', true)}
       </div>
       {round && mine && <HandInDialog {...dialog('handIn')} round={round} mine={mine} />}
       {round && count && (
@@ -80,9 +89,14 @@ function RoundLine() {
   const parts = [roundSentence(round)];
   if (round.state === 'open' && round.deadline !== null) {
     const past = new Date(round.deadline) <= now;
-    parts.push(past ? `The deadline was ${format.moment(round.deadline)}.` : `Hand in by ${format.moment(round.deadline)}.`);
+    parts.push(
+      past
+        ? `The deadline was ${format.moment(round.deadline)}.`
+        : `Hand in by ${format.moment(round.deadline)}.`,
+    );
   }
   if (mine?.handedInAt) parts.push(`You handed in ${format.moment(mine.handedInAt)}.`);
-  if (sealed && assessment && shownRound) parts.push(`The numbers below are those of round ${String(shownRound.number)}.`);
+  if (sealed && assessment && shownRound)
+    parts.push(`The numbers below are those of round ${String(shownRound.number)}.`);
   return <>{parts.join(' ')}</>;
 }

@@ -19,7 +19,9 @@ interface Props {
 export function UnsealDialog({ open, onOpenChange, round, count, hindrance }: Props) {
   const { differential } = useLedger();
   const unseal = useUnsealRound(differential.caseId);
-  const missing = round.members.filter((member) => member.handedInAt === null).map((member) => member.person.name);
+  const missing = round.members
+    .filter((member) => member.handedInAt === null)
+    .map((member) => member.person.name);
   if (hindrance !== null)
     return (
       <Dialog.Root open={open} onOpenChange={onOpenChange}>
@@ -44,7 +46,9 @@ export function UnsealDialog({ open, onOpenChange, round, count, hindrance }: Pr
       title={`Unseal round ${String(round.number)} with ${String(count.in)} of ${String(count.of)} in`}
       verb="Unseal the round"
       {...(withReason ? { wordsLabel: `Why, below the quorum of ${String(count.quorum)}` } : {})}
-      onConfirm={({ words }) => unseal.mutateAsync({ roundId: round.id, ...(withReason ? { reason: words } : {}) })}
+      onConfirm={({ words }) =>
+        unseal.mutateAsync({ roundId: round.id, ...(withReason ? { reason: words } : {}) })
+      }
     >
       Everybody on the team sees all numbers at once. This cannot be taken back.
       {missing.length > 0 && ` Not in, and left out of this round: ${listed(missing)}.`}

@@ -7,7 +7,12 @@ import { DraftsProvider } from '../drafts/drafts-context';
 import { LedgerProvider, type Panel } from '../ledger/ledger-context';
 import { LedgerScreen } from '../ledger/ledger-screen';
 import '../ledger/ledger.css';
+import '../ledger/standing.css';
+import '../ledger/narrow-rows.css';
 import '../ledger/side.css';
+import '../editor/editor.css';
+import '../cards/cards.css';
+import '../prior-first/prior-first.css';
 
 /** The differential: the ledger of a case. */
 export default function DifferentialRoute() {
@@ -27,7 +32,11 @@ export default function DifferentialRoute() {
       {found.isPending ? (
         <SkeletonRows rows={8} />
       ) : (
-        <Failure error={found.error} what="The differential could not be opened." retry={() => void found.refetch()} />
+        <Failure
+          error={found.error}
+          what="The differential could not be opened."
+          retry={() => void found.refetch()}
+        />
       )}
     </div>
   );

@@ -56,7 +56,8 @@ describe('checking seals', () => {
   it('tells a digest that was exchanged between hand-in and unsealing', async () => {
     const seal = await makeSeal();
     const seen = (digest: string) => ({ 'round person': { digest, at: '2026-12-01T09:00:00.000Z' } });
-    const compare = async (memory: Parameters<typeof checkSeals>[1]) => (await checkSeals([seal], memory))[0]?.seen;
+    const compare = async (memory: Parameters<typeof checkSeals>[1]) =>
+      (await checkSeals([seal], memory))[0]?.seen;
     expect(await compare(seen(seal.digest.toUpperCase()))).toBe('same');
     expect(await compare(seen('0'.repeat(64)))).toBe('other');
     expect(await compare({})).toBe('never');

@@ -17,7 +17,11 @@ export function checkSeals(seals: readonly Seal[], seen: SeenDigests): Promise<C
     seals.map(async (seal) => {
       const before = seenDigest(seen, seal.roundId, seal.person.id);
       const same = before?.digest.toLowerCase() === seal.digest.toLowerCase();
-      return { seal, verdict: await verdictOf(seal), seen: before === null ? 'never' : same ? 'same' : 'other' };
+      return {
+        seal,
+        verdict: await verdictOf(seal),
+        seen: before === null ? 'never' : same ? 'same' : 'other',
+      };
     }),
   );
 }

@@ -24,7 +24,9 @@ export function seenDigest(seen: SeenDigests, roundId: string, personId: string)
 export function withSeen(seen: SeenDigests, round: Round, at: string): SeenDigests {
   if (round.kind !== 'sealed' || round.state !== 'open') return seen;
   const fresh = round.members.flatMap(({ person, digest }) =>
-    digest === null || seenDigest(seen, round.id, person.id) ? [] : [[keyOf(round.id, person.id), { digest, at }] as const],
+    digest === null || seenDigest(seen, round.id, person.id)
+      ? []
+      : [[keyOf(round.id, person.id), { digest, at }] as const],
   );
   return fresh.length === 0 ? seen : { ...seen, ...Object.fromEntries(fresh) };
 }

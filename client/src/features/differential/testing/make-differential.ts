@@ -28,11 +28,27 @@ export function makeFinding(parts: Partial<Finding> = {}): Finding {
 }
 
 export function makeCandidate(id: string, parts: Partial<Candidate> = {}): Candidate {
-  return { id, name: id, detail: '', mustNotMiss: false, addedBy: 'Dr A', retired: false, retiredWords: null, ...parts };
+  return {
+    id,
+    name: id,
+    detail: '',
+    mustNotMiss: false,
+    addedBy: 'Dr A',
+    retired: false,
+    retiredWords: null,
+    ...parts,
+  };
 }
 
 export function makeRow(findingId: string, outOf100: RowJudgement['outOf100']): RowJudgement {
-  return { findingId, version: 1, exposure: 'often', outOf100, reason: null, savedAt: '2026-12-01T09:00:00.000Z' };
+  return {
+    findingId,
+    version: 1,
+    exposure: 'often',
+    outOf100,
+    reason: null,
+    savedAt: '2026-12-01T09:00:00.000Z',
+  };
 }
 
 export function makeMine(parts: Partial<Mine> = {}): Mine {

@@ -65,12 +65,19 @@ describe('reading a row', () => {
     const read = readRow(draft, columns, 3);
     expect(read.outOf100).toEqual([[10, 20, 70], null, null]);
     expect(read.faults).toEqual([
-      { columnId: 'lymphoma', level: null, message: 'all levels together must be 100: 90 of 100 left, 2 shares still blank' },
+      {
+        columnId: 'lymphoma',
+        level: null,
+        message: 'all levels together must be 100: 90 of 100 left, 2 shares still blank',
+      },
     ]);
   });
 });
 
 it('reads a prior as shares of 100', () => {
   expect(readPrior(typed({ still: ['60'], lymphoma: ['20'], none: ['20'] }), columns).complete).toBe(true);
-  expect(readPrior(typed({ still: ['60'], lymphoma: ['40'] }), columns)).toMatchObject({ blanks: 1, complete: false });
+  expect(readPrior(typed({ still: ['60'], lymphoma: ['40'] }), columns)).toMatchObject({
+    blanks: 1,
+    complete: false,
+  });
 });

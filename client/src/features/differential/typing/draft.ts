@@ -1,4 +1,9 @@
-import type { Exposure, JudgementDraft, JudgementDraftInput, RowJudgement } from '@weighhouse/shared/contracts/judgements';
+import type {
+  Exposure,
+  JudgementDraft,
+  JudgementDraftInput,
+  RowJudgement,
+} from '@weighhouse/shared/contracts/judgements';
 import { type Column, noneId } from '../model/columns';
 import { numberText } from './parse-number';
 
@@ -57,7 +62,12 @@ export function wireDraft(target: string, draft: Draft, columns: readonly Column
  * A draft as the server kept it. One that was typed under another candidate set has lost which column is which, so
  * only its exposure, its reason and the last column (none of these) can be taken over.
  */
-export function draftFromWire(kept: JudgementDraft, columns: readonly Column[], candidateSet: number, base: number): Draft {
+export function draftFromWire(
+  kept: JudgementDraft,
+  columns: readonly Column[],
+  candidateSet: number,
+  base: number,
+): Draft {
   const same = kept.candidateSet === candidateSet && kept.typed.length === columns.length;
   const cells = same
     ? columns.map((column) => [column.id, kept.typed[column.index] ?? []] as const)
@@ -68,7 +78,12 @@ export function draftFromWire(kept: JudgementDraft, columns: readonly Column[], 
 /** Whether two drafts say the same; blanks and missing columns are the same. */
 export function sameDraft(one: Draft, other: Draft, columns: readonly Column[]): boolean {
   const cellsOf = (draft: Draft) =>
-    columns.map((column) => (draft.cells.get(column.id) ?? []).map((text) => text.trim()).join('|').replace(/\|+$/, ''));
+    columns.map((column) =>
+      (draft.cells.get(column.id) ?? [])
+        .map((text) => text.trim())
+        .join('|')
+        .replace(/\|+$/, ''),
+    );
   const texts = [cellsOf(one), cellsOf(other)];
   return (
     one.exposure === other.exposure &&

@@ -1,5 +1,6 @@
 /** What somebody typed where a number out of 100 is asked for. */
-export type TypedNumber = { kind: 'blank' } | { kind: 'number'; value: number } | { kind: 'fault'; message: string };
+export type TypedNumber =
+  { kind: 'blank' } | { kind: 'number'; value: number } | { kind: 'fault'; message: string };
 
 /** The bounds and the one decimal are those of the contract (judgements.ts): 0 and 100 would be a veto. */
 const lowest = 0.1;

@@ -30,7 +30,11 @@ export function readRow(draft: Draft, columns: readonly Column[], levels: number
   });
   const filled = outOf100.filter((cell) => cell !== null).length;
   if (filled > 0 && draft.exposure === null)
-    faults.push({ columnId: null, level: null, message: 'say how often you see this picture: seldom, sometimes or often' });
+    faults.push({
+      columnId: null,
+      level: null,
+      message: 'say how often you see this picture: seldom, sometimes or often',
+    });
   return { outOf100, filled, faults };
 }
 
@@ -46,7 +50,11 @@ function readLevels(column: Column, texts: string[], faults: DraftFault[]): numb
   for (const { index, message } of shares.faults) faults.push({ columnId: column.id, level: index, message });
   if (shares.complete) return shares.values.map((value) => value ?? 0);
   if (shares.faults.length === 0)
-    faults.push({ columnId: column.id, level: null, message: `all levels together must be 100: ${restWords(shares)}` });
+    faults.push({
+      columnId: column.id,
+      level: null,
+      message: `all levels together must be 100: ${restWords(shares)}`,
+    });
   return null;
 }
 

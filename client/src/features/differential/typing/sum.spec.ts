@@ -9,7 +9,11 @@ describe('shares of 100', () => {
 
   it('are not complete with a blank, a fault or a rest', () => {
     expect(readShares(['50', '', '50'])).toMatchObject({ blanks: 1, rest: 0, complete: false });
-    expect(readShares(['50', 'x', '50'])).toMatchObject({ blanks: 0, complete: false, faults: [{ index: 1 }] });
+    expect(readShares(['50', 'x', '50'])).toMatchObject({
+      blanks: 0,
+      complete: false,
+      faults: [{ index: 1 }],
+    });
     expect(readShares(['50', '20', '20'])).toMatchObject({ rest: 10, complete: false });
     expect(readShares(['50', '40', '20'])).toMatchObject({ rest: -10, complete: false });
   });

@@ -15,7 +15,9 @@ export interface Shares {
 export function readShares(texts: readonly string[]): Shares {
   const typed = texts.map(parseOutOf100);
   const values = typed.map((one) => (one.kind === 'number' ? one.value : null));
-  const faults = typed.flatMap((one, index) => (one.kind === 'fault' ? [{ index, message: one.message }] : []));
+  const faults = typed.flatMap((one, index) =>
+    one.kind === 'fault' ? [{ index, message: one.message }] : [],
+  );
   const tenths = values.reduce<number>((sum, value) => sum + Math.round((value ?? 0) * 10), 0);
   const blanks = typed.filter((one) => one.kind === 'blank').length;
   const rest = (1000 - tenths) / 10;

@@ -7,7 +7,8 @@ import { refreshEvidence } from './refresh-evidence';
 export function useAddFinding(caseId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: z.input<typeof newFindingSchema>) => post(`/api/cases/${caseId}/findings`, findingSchema, body),
+    mutationFn: (body: z.input<typeof newFindingSchema>) =>
+      post(`/api/cases/${caseId}/findings`, findingSchema, body),
     onSuccess: () => refreshEvidence(client, caseId),
   });
 }

@@ -8,7 +8,11 @@ export function useRetireCandidate(caseId: string) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: ({ candidateId, words }: { candidateId: string; words: string }) =>
-      post(`/api/candidates/${candidateId}/retire`, candidateSetSchema, words.trim() === '' ? {} : { words: words.trim() }),
+      post(
+        `/api/candidates/${candidateId}/retire`,
+        candidateSetSchema,
+        words.trim() === '' ? {} : { words: words.trim() },
+      ),
     onSuccess: () => refreshEvidence(client, caseId),
   });
 }

@@ -2,7 +2,7 @@ import { Button } from '@radix-ui/themes';
 import type { Finding } from '@weighhouse/shared/contracts/findings';
 import { useState } from 'react';
 import { ConfirmDialog } from '../../../components/confirm-dialog';
-import { useEnterInError } from '../api/enter-in-error';
+import { useEnterInError } from '../../findings/api/enter-in-error';
 
 export function EnteredInErrorButton({ caseId, finding }: { caseId: string; finding: Finding }) {
   const [open, setOpen] = useState(false);

@@ -1,8 +1,22 @@
 import { describe, expect, it } from 'vitest';
-import { makeFinding } from '../../differential/testing/make-differential';
-import { bodyOf, changeBody, emptyFinding, faultsOf, type FindingValues, newBody, valuesOf } from './finding-values';
+import { makeFinding } from '../testing/make-differential';
+import {
+  bodyOf,
+  changeBody,
+  emptyFinding,
+  faultsOf,
+  type FindingValues,
+  newBody,
+  valuesOf,
+} from './finding-values';
 
-const good: FindingValues = { ...emptyFinding, title: 'Fever', kind: 'symptom', observed: '1', reliability: 'firm' };
+const good: FindingValues = {
+  ...emptyFinding,
+  title: 'Fever',
+  kind: 'symptom',
+  observed: '1',
+  reliability: 'firm',
+};
 const paths = (values: FindingValues) => faultsOf(values).map((fault) => fault.path);
 
 describe('the form of a finding', () => {
@@ -28,7 +42,11 @@ describe('the form of a finding', () => {
   });
 
   it('names a number that is none', () => {
-    expect(paths({ ...good, observed: 'pending', cost: 'much', burden: '4', waitDays: '-1' })).toEqual(['cost', 'waitDays', 'burden']);
+    expect(paths({ ...good, observed: 'pending', cost: 'much', burden: '4', waitDays: '-1' })).toEqual([
+      'cost',
+      'waitDays',
+      'burden',
+    ]);
   });
 
   it('takes a report with its page, or words, and no page without a report', () => {
@@ -50,7 +68,12 @@ describe('the form of a finding', () => {
   });
 
   it('opens a finding as it is and sends it back the same', () => {
-    const finding = makeFinding({ levelLabels: ['none', 'few', 'many'], observed: 2, reliability: 0.7, version: 4 });
+    const finding = makeFinding({
+      levelLabels: ['none', 'few', 'many'],
+      observed: 2,
+      reliability: 0.7,
+      version: 4,
+    });
     expect(changeBody(valuesOf(finding), finding.version)).toMatchObject({
       version: 4,
       levelLabels: ['none', 'few', 'many'],

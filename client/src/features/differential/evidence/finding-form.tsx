@@ -1,12 +1,12 @@
 import { Button } from '@radix-ui/themes';
 import type { Settings } from '@weighhouse/shared/contracts/cases';
 import type { Finding } from '@weighhouse/shared/contracts/findings';
-import { type FormEvent, useState } from 'react';
+import { useState } from 'react';
 import { ErrorSummary } from '../../../components/error-summary';
 import { FailureLine } from '../../../components/failure';
 import { isApiError } from '../../../lib/api-error';
-import { useAddFinding } from '../api/add-finding';
-import { useChangeFinding } from '../api/change-finding';
+import { useAddFinding } from '../../findings/api/add-finding';
+import { useChangeFinding } from '../../findings/api/change-finding';
 import { FindingBothTexts } from './finding-both-texts';
 import { FindingFields } from './finding-fields';
 import { changeBody, emptyFinding, faultsOf, type FindingValues, newBody, valuesOf } from './finding-values';
@@ -49,13 +49,21 @@ export function FindingForm({ caseId, finding, groups, fromReport, onDone, onCan
   const [values, setValues] = useState<FindingValues>(() =>
     finding
       ? valuesOf(finding)
-      : { ...emptyFinding, reportId: fromReport?.reportId ?? '', page: fromReport?.page == null ? '' : String(fromReport.page) },
+      : {
+          ...emptyFinding,
+          reportId: fromReport?.reportId ?? '',
+          page: fromReport?.page == null ? '' : String(fromReport.page),
+        },
   );
   const [tried, setTried] = useState(false);
   const own = tried ? faultsOf(values) : [];
   const error = finding ? change.error : add.error;
   const faults = own.length > 0 ? own : isApiError(error) ? error.fields : [];
-  const stale = isApiError(change.error, 'stale') && finding !== null && base !== null && finding.version !== base.version;
+  const stale =
+    isApiError(change.error, 'stale') &&
+    finding !== null &&
+    base !== null &&
+    finding.version !== base.version;
   const set = (more: Partial<FindingValues>) => {
     setValues((known) => ({ ...known, ...more }));
   };
@@ -78,7 +86,7 @@ export function FindingForm({ caseId, finding, groups, fromReport, onDone, onCan
     <form
       className="finding-form"
       noValidate
-      onSubmit={(event: FormEvent) => {
+      onSubmit={(event) => {
         event.preventDefault();
         void send(base?.version);
       }}

@@ -1,7 +1,7 @@
 import { Button, TextField } from '@radix-ui/themes';
 import type { Settings } from '@weighhouse/shared/contracts/cases';
 import type { Finding } from '@weighhouse/shared/contracts/findings';
-import { type FormEvent, useState } from 'react';
+import { type SyntheticEvent, useState } from 'react';
 import { ErrorSummary } from '../../../components/error-summary';
 import { FailureLine } from '../../../components/failure';
 import { fieldId } from '../../../components/faults';
@@ -29,7 +29,7 @@ export function GroupsForm({ groups, findings, onSave }: Props) {
     setState('typing');
     setValues((known) => known.map((group, at) => (at === index ? { ...group, ...more } : group)));
   };
-  const submit = async (event: FormEvent) => {
+  const submit = async (event: SyntheticEvent) => {
     event.preventDefault();
     if (read.faults.length > 0) {
       setError('own');
@@ -46,13 +46,20 @@ export function GroupsForm({ groups, findings, onSave }: Props) {
       setState('typing');
     }
   };
-  const labels = Object.fromEntries(values.map((_, index) => [`groups.${String(index)}`, `Group ${String(index + 1)}`]));
+  const labels = Object.fromEntries(
+    values.map((_, index) => [`groups.${String(index)}`, `Group ${String(index + 1)}`]),
+  );
   return (
     <form className="finding-form" noValidate onSubmit={(event) => void submit(event)}>
       <ErrorSummary faults={faults} labels={{ ...labels, reason: 'Reason for the change' }} />
       {values.length === 0 && <p className="soft">No groups yet.</p>}
       {values.map((group, index) => (
-        <fieldset key={group.id ?? index} className="group-fields" id={fieldId(`groups.${String(index)}`)} tabIndex={-1}>
+        <fieldset
+          key={group.id ?? index}
+          className="group-fields"
+          id={fieldId(`groups.${String(index)}`)}
+          tabIndex={-1}
+        >
           <legend>Group {index + 1}</legend>
           <TextField.Root
             aria-label={`Name of group ${String(index + 1)}`}
@@ -135,5 +142,7 @@ export function GroupsForm({ groups, findings, onSave }: Props) {
 function memberWords(findings: readonly Finding[], id: string | undefined): string {
   if (id === undefined) return 'Once it is saved, findings can join it.';
   const members = findings.filter((finding) => finding.groupId === id && !finding.enteredInError);
-  return members.length === 0 ? 'No finding is in it.' : `In it: ${members.map((finding) => finding.title).join('; ')}.`;
+  return members.length === 0
+    ? 'No finding is in it.'
+    : `In it: ${members.map((finding) => finding.title).join('; ')}.`;
 }

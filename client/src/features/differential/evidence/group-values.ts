@@ -23,7 +23,10 @@ export const valuesOfGroups = (groups: Settings['groups']): GroupValues[] =>
   }));
 
 /** Reads the form; every fault is named. */
-export function groupsInput(values: readonly GroupValues[], reason: string): { groups: GroupInput[]; faults: FieldFault[] } {
+export function groupsInput(
+  values: readonly GroupValues[],
+  reason: string,
+): { groups: GroupInput[]; faults: FieldFault[] } {
   const faults: FieldFault[] = [];
   const groups = values.map((group, index): GroupInput => {
     const path = `groups.${String(index)}`;

@@ -13,9 +13,9 @@ it('sends a new group without an id and without an empty reason', () => {
 });
 
 it.each(['', '101', '-1', '33.3', 'half'])('refuses an overlap of %j', (overlap) => {
-  expect(groupsInput([{ label: 'Blood', overlap, reason: '' }], 'because').faults.map((fault) => fault.path)).toEqual([
-    'groups.0.overlap',
-  ]);
+  expect(
+    groupsInput([{ label: 'Blood', overlap, reason: '' }], 'because').faults.map((fault) => fault.path),
+  ).toEqual(['groups.0.overlap']);
 });
 
 it('names every fault and always asks for a reason', () => {

@@ -2,9 +2,9 @@ import { Button } from '@radix-ui/themes';
 import type { Candidate } from '@weighhouse/shared/contracts/findings';
 import { useState } from 'react';
 import { ConfirmDialog } from '../../../components/confirm-dialog';
-import { useLedger } from '../../differential/ledger/ledger-context';
-import { columnLetter } from '../../differential/model/columns';
-import { useRetireCandidate } from '../api/retire-candidate';
+import { useLedger } from '../ledger/ledger-context';
+import { columnLetter } from '../model/columns';
+import { useRetireCandidate } from '../../findings/api/retire-candidate';
 import { CandidateForm } from './candidate-form';
 import './findings.css';
 
@@ -21,8 +21,9 @@ export function CandidatesPanel() {
         Candidates
       </h2>
       <p className="side-about">
-        Adding or retiring one makes the next candidate set: everybody gives their prior again, and likelihoods of the
-        other columns stay. {differential.sealed && 'While a round is sealed the set is frozen.'}
+        Adding or retiring one makes the next candidate set: everybody gives their prior again, and
+        likelihoods of the other columns stay.{' '}
+        {differential.sealed && 'While a round is sealed the set is frozen.'}
       </p>
       <ul className="candidate-list">
         {inForce.map((candidate, index) => (
@@ -30,7 +31,9 @@ export function CandidatesPanel() {
             <span>
               {columnLetter(index)} {candidate.name}
               {candidate.mustNotMiss && <span className="small"> (must not miss)</span>}
-              {candidate.detail !== '' && <span className="small soft candidate-detail">{candidate.detail}</span>}
+              {candidate.detail !== '' && (
+                <span className="small soft candidate-detail">{candidate.detail}</span>
+              )}
               <span className="small soft candidate-detail">Added by {candidate.addedBy}</span>
             </span>
             {may('candidate.retire') && (

@@ -49,7 +49,12 @@ function LevelFields({ values, set, faults }: FieldsProps) {
     set({ levelLabels: values.levelLabels.map((known, at) => (at === index ? label : known)) });
   };
   return (
-    <FieldGroup label="Levels" path="levelLabels" faults={faults} hint="Two to six, of which exactly one is so. In order, from least to most where there is an order.">
+    <FieldGroup
+      label="Levels"
+      path="levelLabels"
+      faults={faults}
+      hint="Two to six, of which exactly one is so. In order, from least to most where there is an order."
+    >
       {values.levelLabels.map((label, index) => (
         <TextField.Root
           key={index}

@@ -56,8 +56,12 @@ const plainLevels = ['absent', 'present'];
 const text = (value: number | null) => (value === null ? '' : String(value));
 
 export function valuesOf(finding: Finding): FindingValues {
-  const ownLevels = finding.levelLabels.length > 2 || finding.levelLabels.some((label, index) => label !== plainLevels[index]);
-  const reliability = Object.entries(reliabilityWords).find(([, share]) => Math.abs(share - finding.reliability) < 0.005);
+  const ownLevels =
+    finding.levelLabels.length > 2 ||
+    finding.levelLabels.some((label, index) => label !== plainLevels[index]);
+  const reliability = Object.entries(reliabilityWords).find(
+    ([, share]) => Math.abs(share - finding.reliability) < 0.005,
+  );
   return {
     title: finding.title,
     detail: finding.detail,
@@ -119,7 +123,8 @@ export function faultsOf(values: FindingValues): FieldFault[] {
   const faults: FieldFault[] = [];
   if (values.kind === '') faults.push({ path: 'kind', message: 'choose where it comes from' });
   if (values.observed === '') faults.push({ path: 'observed', message: 'choose what is known' });
-  if (values.reliability === '') faults.push({ path: 'reliability', message: 'choose how far the report can be trusted' });
+  if (values.reliability === '')
+    faults.push({ path: 'reliability', message: 'choose how far the report can be trusted' });
   const body = bodyOf(values);
   const labels = Array.isArray(body.levelLabels) ? body.levelLabels.length : 2;
   if (values.ownLevels && typeof body.observed === 'number' && body.observed >= labels)

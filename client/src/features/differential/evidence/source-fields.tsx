@@ -1,7 +1,7 @@
 import { TextField } from '@radix-ui/themes';
 import { FormField } from '../../../components/form-field';
 import { SelectBox } from '../../../components/select-box';
-import { useReportsOf } from '../api/list-reports';
+import { useReportsOf } from '../../findings/api/list-reports';
 import type { FieldsProps } from './finding-fields';
 
 /** Where it is written and when it was so. */
@@ -56,7 +56,13 @@ export function SourceFields({ caseId, values, set, faults }: FieldsProps & { ca
           )}
         </FormField>
       )}
-      <FormField label="Source in words" path="source.text" faults={faults} optional hint="Who saw it, or where it is written.">
+      <FormField
+        label="Source in words"
+        path="source.text"
+        faults={faults}
+        optional
+        hint="Who saw it, or where it is written."
+      >
         {(control) => (
           <TextField.Root
             {...control}

@@ -1,11 +1,11 @@
 import { Button, TextArea, TextField } from '@radix-ui/themes';
 import { newCandidateSchema } from '@weighhouse/shared/contracts/findings';
-import { type FormEvent, useState } from 'react';
+import { type SyntheticEvent, useState } from 'react';
 import { FailureLine } from '../../../components/failure';
 import { faultsIn } from '../../../components/faults';
 import { FormField } from '../../../components/form-field';
 import { isApiError } from '../../../lib/api-error';
-import { useAddCandidate } from '../api/add-candidate';
+import { useAddCandidate } from '../../findings/api/add-candidate';
 
 const empty = { name: '', detail: '', mustNotMiss: false };
 
@@ -16,7 +16,7 @@ export function CandidateForm({ caseId }: { caseId: string }) {
   const [tried, setTried] = useState(false);
   const own = tried ? faultsIn(newCandidateSchema, values) : [];
   const faults = own.length > 0 ? own : isApiError(add.error) ? add.error.fields : [];
-  const submit = (event: FormEvent) => {
+  const submit = (event: SyntheticEvent) => {
     event.preventDefault();
     setTried(true);
     if (faultsIn(newCandidateSchema, values).length > 0) return;

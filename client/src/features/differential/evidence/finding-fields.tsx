@@ -25,7 +25,12 @@ export const kindWords: Record<FindingKind, string> = {
 export function FindingFields({ values, set, faults, groups }: FieldsProps & { groups: Settings['groups'] }) {
   return (
     <>
-      <FormField label="Finding" path="title" faults={faults} hint="One thing that could be present or absent, such as “Ferritin above 9,000 µg/L”.">
+      <FormField
+        label="Finding"
+        path="title"
+        faults={faults}
+        hint="One thing that could be present or absent, such as “Ferritin above 9,000 µg/L”."
+      >
         {(control) => (
           <TextField.Root
             {...control}
@@ -85,7 +90,13 @@ export function FindingFields({ values, set, faults, groups }: FieldsProps & { g
         )}
       </FormField>
       {groups.length > 0 && (
-        <FormField label="Overlaps with" path="groupId" faults={faults} optional hint="Findings that one mechanism explains.">
+        <FormField
+          label="Overlaps with"
+          path="groupId"
+          faults={faults}
+          optional
+          hint="Findings that one mechanism explains."
+        >
           {(control) => (
             <SelectBox
               {...control}
