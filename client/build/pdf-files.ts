@@ -1,7 +1,7 @@
 import { cp } from 'node:fs/promises';
 import { createReadStream, existsSync, statSync } from 'node:fs';
 import { createRequire } from 'node:module';
-import { dirname, join, normalize, sep } from 'node:path';
+import { dirname, join, normalize, resolve, sep } from 'node:path';
 import type { Plugin } from 'vite';
 
 /** Folders that pdf.js fetches on demand: fonts that a file names but does not carry, character maps, decoders. */
@@ -16,7 +16,7 @@ export function pdfFiles(): Plugin {
     name: 'pdf-files',
     configResolved(config) {
       building = config.command === 'build';
-      outDir = join(config.root, config.build.outDir);
+      outDir = resolve(config.root, config.build.outDir);
     },
     configureServer(server) {
       server.middlewares.use('/pdf', (request, response, next) => {

@@ -18,9 +18,11 @@ export function AccountMenu({ me }: { me: Me }) {
     <DropdownMenu.Root>
       <DropdownMenu.Trigger>
         <button type="button" className="account-button">
-          <span>{me.name}</span>
-          <span className="account-specialty">, {me.specialty}</span>
-          <span aria-hidden="true"> ▾</span>
+          <span className="account-name">
+            {me.name}
+            <span className="account-specialty">, {me.specialty}</span>
+          </span>
+          <span aria-hidden="true">▾</span>
         </button>
       </DropdownMenu.Trigger>
       <DropdownMenu.Content align="end" variant="soft" highContrast>

@@ -22,7 +22,7 @@ export function useSessionOver(): boolean {
         if (
           event.type === 'updated' &&
           event.action.type === 'success' &&
-          event.query.queryKey[0] === meQuery.queryKey[0]
+          (event.query.queryKey as readonly unknown[])[0] === meQuery.queryKey[0]
         )
           setOver(false);
       }),

@@ -19,7 +19,7 @@ export function PersonPicker({ role, label, taken, onPick }: Props) {
   const found = usePeople({ role, q: q === '' ? undefined : q });
   const free = (found.data?.items ?? []).filter((person) => !taken.has(person.id) && person.active !== false);
   return (
-    <div className="person-picker" role="search">
+    <div className="person-picker" role="search" aria-label={label}>
       <TextField.Root
         type="search"
         aria-label={label}

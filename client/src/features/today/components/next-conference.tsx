@@ -25,7 +25,7 @@ export function NextConference({ conference }: { conference: Today['nextConferen
                     {one.number}
                   </Link>
                 </p>
-                <p className="soft small">{one.detail}</p>
+                <p className="soft small">{capital(one.detail)}</p>
               </li>
             ))}
           </ul>

@@ -1,5 +1,6 @@
 import type { Today } from '@weighhouse/shared/contracts/today';
 import { Link } from 'react-router-dom';
+import { capital } from '../../../lib/words';
 import { useFormat } from '../../../lib/use-format';
 import { LeaderBar } from '../../../components/leader-bar';
 
@@ -23,7 +24,7 @@ export function Sitting({ today }: { today: Today }) {
               <p className="row-title">
                 <Link to={`/cases/${one.id}`}>{one.question}</Link>
               </p>
-              <p className="soft small">{one.detail}</p>
+              <p className="soft small">{capital(one.detail)}</p>
             </div>
             <LeaderBar leader={one.leader} />
             <span className="soft small today-date">

@@ -1,17 +1,44 @@
 import type { TodayItem, TodayKind } from '@weighhouse/shared/contracts/today';
 import { capital, counted, numberWord } from '../../../lib/words';
 
-/** Each kind of waiting thing: its section's head and the verb of its button. In the order they are shown. */
-export const kinds: { kind: TodayKind; head: string; verb: string }[] = [
-  { kind: 'judge', head: 'Judge before discussion', verb: 'Judge now' },
-  { kind: 'answer', head: 'Questions to you', verb: 'Answer' },
-  { kind: 'review', head: 'New referrals', verb: 'Review' },
-  { kind: 'unseal', head: 'Rounds that can be unsealed', verb: 'Unseal' },
-  { kind: 'stance', head: 'Plans that ask for your agreement', verb: 'Agree or dissent' },
-  { kind: 'approve', head: 'Summaries to approve', verb: 'Read and approve' },
-  { kind: 'tell', head: 'Patients to tell', verb: 'Tell' },
-  { kind: 'act', head: 'Actions you agreed to', verb: 'Report result' },
-  { kind: 'draft', head: 'Referrals you have begun', verb: 'Go on writing' },
+interface Section {
+  id: string;
+  head: string;
+  /** The verb of its buttons. */
+  verb: string;
+  takes: (item: TodayItem) => boolean;
+}
+
+const of = (kind: TodayKind, head: string, verb: string): Section => ({
+  id: kind,
+  head,
+  verb,
+  takes: (item) => item.kind === kind,
+});
+const sealed = (item: TodayItem) => item.sealedRows !== null;
+
+/** The sections of what waits, in the order they are shown; every item belongs to exactly one. */
+export const sections: Section[] = [
+  {
+    id: 'judge-sealed',
+    head: 'Judge before discussion',
+    verb: 'Judge now',
+    takes: (item) => item.kind === 'judge' && sealed(item),
+  },
+  {
+    id: 'judge-live',
+    head: 'Judge in a live round',
+    verb: 'Judge now',
+    takes: (item) => item.kind === 'judge' && !sealed(item),
+  },
+  of('answer', 'Questions to you', 'Answer'),
+  of('review', 'New referrals', 'Review'),
+  of('unseal', 'Rounds that can be unsealed', 'Unseal'),
+  of('stance', 'Plans that ask for your agreement', 'Agree or dissent'),
+  of('approve', 'Summaries to approve', 'Read and approve'),
+  of('tell', 'Patients to tell', 'Tell'),
+  of('act', 'Actions you agreed to', 'Report result'),
+  of('draft', 'Referrals you have begun', 'Go on writing'),
 ];
 
 /** "Four things wait for you". */

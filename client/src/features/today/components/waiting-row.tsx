@@ -3,7 +3,7 @@ import type { TodayItem } from '@weighhouse/shared/contracts/today';
 import { Link } from 'react-router-dom';
 import { SealedMark } from '../../../components/sealed-mark';
 import { useFormat } from '../../../lib/use-format';
-import { counted } from '../../../lib/words';
+import { capital, counted } from '../../../lib/words';
 import { dueLine } from './today-words';
 
 /** One thing that waits: the case's number, what it is, how much or by when, and the button that does it. */
@@ -13,7 +13,7 @@ export function WaitingRow({ item, verb }: { item: TodayItem; verb: string }) {
       <span className="figures today-number">{item.number}</span>
       <div>
         <p className="row-title">{item.title}</p>
-        <p className="soft small">{item.detail}</p>
+        <p className="soft small">{capital(item.detail)}</p>
       </div>
       <Mark item={item} />
       <Button

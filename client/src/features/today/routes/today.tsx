@@ -10,7 +10,7 @@ import { useSignedIn } from '../../people/api/get-me';
 import { useToday } from '../api/get-today';
 import { NextConference } from '../components/next-conference';
 import { Sitting } from '../components/sitting';
-import { kinds, oldestLine, todayTitle } from '../components/today-words';
+import { oldestLine, sections, todayTitle } from '../components/today-words';
 import { WaitingRow } from '../components/waiting-row';
 
 export default function TodayPage() {
@@ -57,13 +57,13 @@ function TodayView({ today }: { today: Today }) {
                 : 'Invitations and people are looked after under People.'}
           </EmptyState>
         )}
-        {kinds.map(({ kind, head, verb }) => {
-          const items = waiting.filter((item) => item.kind === kind);
+        {sections.map(({ id, head, verb, takes }) => {
+          const items = waiting.filter(takes);
           if (items.length === 0) return null;
           return (
-            <section key={kind} aria-labelledby={`today-${kind}`}>
+            <section key={id} aria-labelledby={`today-${id}`}>
               <div className="section-head">
-                <h2 id={`today-${kind}`}>{head}</h2>
+                <h2 id={`today-${id}`}>{head}</h2>
                 {items.some((item) => item.sealedRows !== null) && (
                   <span className="soft small">sealed until the chair unseals the round</span>
                 )}

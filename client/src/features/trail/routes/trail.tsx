@@ -6,7 +6,9 @@ import { Failure } from '../../../components/failure';
 import { Pager } from '../../../components/pager';
 import { SkeletonRows } from '../../../components/skeleton';
 import { useFormat } from '../../../lib/use-format';
+import { numberWord } from '../../../lib/words';
 import { useCaseId } from '../../cases/api/get-case';
+import { runsOf } from '../components/trail-runs';
 import { trailPageSize, useTrail } from '../api/get-trail';
 
 /** Who did what and when on this case, as far as this person may see it. */
@@ -53,12 +55,19 @@ function Entries({ items }: { items: TrailEntry[] }) {
   const format = useFormat();
   return (
     <ol className="trail-list">
-      {items.map((entry) => (
+      {runsOf(items).map(({ entry, times, since }) => (
         <li key={entry.id}>
           <time className="figures soft" dateTime={entry.at}>
             {format.moment(entry.at)}
           </time>
-          <span>{entry.sentence}</span>
+          <span>
+            <b>{entry.who ?? 'The service'}</b> {entry.sentence}
+            {times > 1 && (
+              <span className="soft">
+                , {numberWord(times)} times{since === entry.at ? '' : ` since ${format.moment(since)}`}
+              </span>
+            )}
+          </span>
         </li>
       ))}
     </ol>
