@@ -14,7 +14,8 @@ export function useSignIn() {
     onSuccess: (me) => {
       const before = client.getQueryData(meQuery.queryKey);
       const same = before?.id === me.id;
-      if (!same) client.clear();
+      // The query of who is signed in stays: the page that waits for its answer looks at it.
+      if (!same) client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== meQuery.queryKey[0] });
       client.setQueryData(meQuery.queryKey, me);
       decideSession(same);
     },
