@@ -105,7 +105,7 @@ export function ActionFields({
               onMove(-1);
             }}
           >
-            Move up<span className="aside-text">: {name}</span>
+            Move up<span className="aside-text"> {name}</span>
           </Button>
           <Button
             type="button"
@@ -116,10 +116,10 @@ export function ActionFields({
               onMove(1);
             }}
           >
-            Move down<span className="aside-text">: {name}</span>
+            Move down<span className="aside-text"> {name}</span>
           </Button>
           <Button type="button" variant="ghost" color="red" onClick={onRemove}>
-            Remove<span className="aside-text">: {name}</span>
+            Remove<span className="aside-text"> {name}</span>
           </Button>
         </div>
       </div>

@@ -90,7 +90,7 @@ function ActionRow({
                   setReporting(true);
                 }}
               >
-                Report it done<span className="aside-text">: {action.what}</span>
+                Report it done<span className="aside-text"> {action.what}</span>
               </Button>
             )}
           </td>

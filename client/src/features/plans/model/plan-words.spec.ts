@@ -36,6 +36,8 @@ describe('plan words', () => {
     expect(planTitle(view(plan({ stances })), true)).toBe('Plan 1 is a draft; nobody has been asked yet');
     const asked = plan({ stances, askedAt: '2026-12-01T10:00:00Z' });
     expect(planTitle(view(asked), true)).toBe('Plan 1: one of three contributors answered');
+    const silent = { ...asked, stances: [stance('Dr A', null), stance('Dr B', null)] };
+    expect(planTitle(view(silent), true)).toBe('Plan 1: none of two contributors answered');
     expect(planTitle(view({ ...asked, stances: [stance('Dr A', 'dissent')] }), true)).toBe(
       'Plan 1: every contributor answered',
     );

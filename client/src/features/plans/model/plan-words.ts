@@ -16,7 +16,7 @@ export function planTitle({ draft, signed }: PlanView, working: boolean): string
   if (draft.askedAt === null) return `${name} is a draft; nobody has been asked yet`;
   const { answered, asked } = progress(draft);
   if (answered < asked)
-    return `${name}: ${numberWord(answered)} of ${numberWord(asked)} contributors answered`;
+    return `${name}: ${answered === 0 ? 'none' : numberWord(answered)} of ${numberWord(asked)} contributors answered`;
   return `${name}: every contributor answered`;
 }
 

@@ -63,7 +63,7 @@ function Report({ caseId, id, what }: { caseId: string; id: string; what: string
             setOpen(true);
           }}
         >
-          Report it done<span className="aside-text">: {what}</span>
+          Report it done<span className="aside-text"> {what}</span>
         </Button>
       </div>
     );
