@@ -12,7 +12,6 @@ import { OutcomesModule } from './outcomes/outcomes.module.js';
 import { ExportsModule } from './exports/exports.module.js';
 import { LiveModule } from './live/live.module.js';
 import { AuditModule } from './audit/audit.module.js';
-import { NotificationsModule } from './notifications/notifications.module.js';
 import { TodayModule } from './today/today.module.js';
 import { entities } from './entities.js';
 import { type Configuration, CONFIGURATION } from './platform/config/configuration.js';
@@ -41,7 +40,6 @@ const database: DynamicModule = TypeOrmModule.forRootAsync({
     ExportsModule,
     LiveModule,
     AuditModule,
-    NotificationsModule,
     TodayModule,
   ],
   providers: [
