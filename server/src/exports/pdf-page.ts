@@ -40,6 +40,7 @@ export class PdfPage {
   }
 
   title(text: string): void {
+    if (this.document.y > margin) this.gap(10);
     this.write(text, { size: 20, weight: 'bold' });
     this.gap(4);
   }
