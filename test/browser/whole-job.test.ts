@@ -3,7 +3,7 @@ import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { writeReportPdf } from '@weighhouse/db/demo/report-pdf';
 import type { Browser } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import { makePerson, type TestPerson } from '../factories/people.js';
 import { type RunningApp, startApp } from '../setup/app.js';
 import { mailbox } from '../setup/mailbox.js';
@@ -56,6 +56,14 @@ describe('five people close a case together', () => {
   afterAll(async () => {
     await browser.close();
     await running.close();
+  });
+
+  /** With SCREENSHOTS set to a folder, every desk is photographed after each chapter, to be looked at. */
+  afterEach(async ({ task }) => {
+    const folder = process.env['SCREENSHOTS'];
+    if (folder === undefined) return;
+    const chapter = task.name.replace(/[^a-z]+/gi, '-').slice(0, 40);
+    for (const who of everybody) await page(who).screenshot({ path: path.join(folder, `${chapter}-${who}.png`) });
   });
 
   it('all sign in', async () => {

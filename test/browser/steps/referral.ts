@@ -8,6 +8,8 @@ export async function refer(page: Page, report: Buffer): Promise<string> {
   await page.getByRole('link', { name: 'Cases', exact: true }).click();
   await page.getByRole('link', { name: 'New referral' }).first().click();
   await page.getByLabel('Question').fill(question);
+  await page.getByRole('button', { name: 'Begin the referral' }).click();
+  await page.waitForURL(/\/cases\/[0-9a-f-]{36}\/edit/);
   await page.getByLabel('Age').fill('47');
   await page.getByLabel('Sex').selectOption('female');
   await page.getByRole('radio', { name: 'Within a week' }).click();
@@ -20,7 +22,6 @@ export async function refer(page: Page, report: Buffer): Promise<string> {
     .getByText(/^Saved/)
     .first()
     .waitFor();
-  await page.waitForURL(/\/cases\/[0-9a-f-]{36}\/edit/);
   const caseId = /\/cases\/([0-9a-f-]{36})/.exec(page.url())?.[1] ?? '';
   await page.locator('input[type="file"]').setInputFiles([
     { name: 'Ultrasound.pdf', mimeType: 'application/pdf', buffer: report },
