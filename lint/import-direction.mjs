@@ -26,8 +26,8 @@ export const readers = ['live', 'audit', 'notifications', 'today', 'exports'];
 /** What shared code may rely on, in a browser and on a server alike. */
 const sharedPackages = ['package:zod', 'package:canonicalize'];
 
-/** The command that reads a panel from standard input. */
-const isCommand = /^shared\/src\/reasoning\/(\w+-)?command\.\w+$/;
+/** The command that reads a panel from standard input, and what starts commands. */
+const isCommand = /^shared\/(src\/reasoning\/(\w+-)?command\.\w+|commands\/[\w-]+\.mjs)$/;
 
 /** @param {string} file */
 const isTest = (file) => /\.(spec|test)\.[a-z]+$/.test(file) || file.includes('/testing/');

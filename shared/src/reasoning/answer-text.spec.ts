@@ -33,7 +33,7 @@ describe('a panel as text', () => {
 });
 
 describe('the command', () => {
-  const launcher = fileURLToPath(new URL('assess-command.mjs', import.meta.url));
+  const launcher = fileURLToPath(new URL('../../commands/assess.mjs', import.meta.url));
   const run = (input: string) => spawnSync(process.execPath, [launcher], { input, encoding: 'utf8' });
 
   it('prints the assessment and exits 0, or the faults and exits 1', { timeout: 120_000 }, () => {

@@ -27,6 +27,8 @@ const given = (cells: unknown, levels = 2) => ({
   ...contributor({ likelihoods: { f: { given: cells } } }),
   findings: [{ id: 'f', levels }],
 });
+const withHole = new Array<number>(3);
+withHole[0] = withHole[2] = 0.5;
 const many = (length: number, make: (index: number) => unknown) =>
   Array.from({ length }, (_, index) => make(index));
 
@@ -149,7 +151,7 @@ describe('refused, with the path of the fault', () => {
     ['null in a prior', contributor({ prior: [0.5, null, 0.5] }), ['contributors[0].prior[1]']],
     ['NaN in a prior', contributor({ prior: [0.5, NaN, 0.5] }), ['contributors[0].prior[1]']],
     ['1e-300 in a prior', contributor({ prior: [0.5, 1e-300, 0.5] }), ['contributors[0].prior[1]']],
-    ['a hole in a prior', contributor({ prior: [0.5, , 0.5] }), ['contributors[0].prior[1]']],
+    ['a hole in a prior', contributor({ prior: withHole }), ['contributors[0].prior[1]']],
     ['a prior that sums to 0.9', contributor({ prior: [0.2, 0.2, 0.5] }), ['contributors[0].prior']],
 
     ['likelihoods as a list', contributor({ likelihoods: [] }), ['contributors[0].likelihoods']],

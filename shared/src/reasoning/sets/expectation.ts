@@ -21,17 +21,15 @@ export function expectation(asked: Asked, support: Support, finding: number): Bo
   let missed = 0;
   for (let level = 0; level < panel.findings[finding]!.levels; level += 1) {
     writeRow(work, support, asked.row(view, finding, level));
-    let p = 0;
+    const p = sumAndLogs(shares, work, after);
+    power.raise(work);
     let total = 0;
     let logs = 0;
     for (let index = 0; index < work.length; index += 1) {
-      const given = work[index]!;
-      const share = shares[index]!;
-      const raised = share * power.of(given);
-      after[index] = raised;
-      p += share * given;
-      total += raised;
-      logs += raised * fastLog(given);
+      const share = shares[index]! * work[index]!;
+      total += share;
+      logs += share * after[index]!;
+      after[index] = share;
     }
     for (let index = 0; index < after.length; index += 1) after[index]! /= total;
     // KL(after ‖ now), after / now being P'^γ / total.
@@ -40,4 +38,14 @@ export function expectation(asked: Asked, support: Support, finding: number): Bo
     levels.push({ p, standing: marginals(table, support, after, after[0]!) });
   }
   return { value: { bits: Math.max(0, nats) / Math.LN2, levels }, missed };
+}
+
+/** Writes the logarithm of each likelihood, and returns Σ share × likelihood: how likely the level is. */
+function sumAndLogs(shares: Float64Array, likelihoods: Float64Array, logs: Float64Array): number {
+  let sum = 0;
+  for (let index = 0; index < likelihoods.length; index += 1) {
+    sum += shares[index]! * likelihoods[index]!;
+    logs[index] = fastLog(likelihoods[index]!);
+  }
+  return sum;
 }

@@ -1,16 +1,12 @@
-import {
-  exponentBias,
-  halves,
-  stepMiddles,
-  stepShift,
-  stepsPerOctave,
-  upper,
-  written,
-} from './number-parts.js';
+import * as parts from './number-parts.js';
+
+const written = new Float64Array(1);
+const halves = new Uint32Array(written.buffer);
+const { upper, stepShift, stepsPerOctave, stepMiddles } = parts;
 
 /** Numbers down to 2^-32 have their place in the table; smaller ones are rare and take the slow way. */
 const octaves = 32;
-const lowestStep = (exponentBias - octaves) * stepsPerOctave;
+const lowestStep = (parts.exponentBias - octaves) * stepsPerOctave;
 
 /**
  * Raises numbers from 0 to 1 to one fixed exponent (0 to 1), with a relative
@@ -21,7 +17,7 @@ const lowestStep = (exponentBias - octaves) * stepsPerOctave;
  * the binomial series. A panel needs tens of millions of powers and only a few
  * exponents.
  *
- * @example new FixedPower(0.5).of(0.25) // 0.5
+ * @example new FixedPower(0.5).raise(Float64Array.of(0.25, 1)) // 0.5 and 1 are in its place
  */
 export class FixedPower {
   private readonly raised = new Float64Array(octaves * stepsPerOctave + 1);
@@ -50,12 +46,18 @@ export class FixedPower {
     this.fifth = (this.fourth * (exponent - 4)) / 5;
   }
 
-  of(x: number): number {
-    written[0] = x;
-    const step = (halves[upper]! >>> stepShift) - lowestStep;
-    if (step < 0 || step >= this.raised.length) return x ** this.exponent;
-    const t = x * this.inverses[step]! - 1;
-    const series = this.exponent + t * (this.second + t * (this.third + t * (this.fourth + t * this.fifth)));
-    return this.raised[step]! * (1 + t * series);
+  /** Raises every number of a list, in place. What a round needs is at hand in the function, not looked up. */
+  raise(numbers: Float64Array): void {
+    const { exponent, raised, inverses, second, third, fourth, fifth } = this;
+    for (let index = 0; index < numbers.length; index += 1) {
+      const x = numbers[index]!;
+      written[0] = x;
+      const step = (halves[upper]! >>> stepShift) - lowestStep;
+      if (step >= 0 && step < raised.length) {
+        const t = x * inverses[step]! - 1;
+        const series = exponent + t * (second + t * (third + t * (fourth + t * fifth)));
+        numbers[index] = raised[step]! * (1 + t * series);
+      } else numbers[index] = x ** exponent;
+    }
   }
 }

@@ -1,12 +1,10 @@
 /*
- * A number seen as its 64 bits, through memory that two lists share. Reading
- * the exponent and the first digits this way is what makes FastLog and
- * FixedPower several times as quick as Math.log and Math.pow.
+ * A number seen as its 64 bits, through memory that a Float64Array and a
+ * Uint32Array share. Reading the exponent and the first digits this way is what
+ * makes fastLog and FixedPower several times as quick as Math.log and Math.pow.
+ * Each has the shared memory and the constants it works with in its own file:
+ * what is imported is looked up anew in every round of an inner loop.
  */
-
-/** Write a number to the first place, then read its upper half from `halves[upper]`. */
-export const written = new Float64Array(1);
-export const halves = new Uint32Array(written.buffer);
 
 /** Which half holds the sign, the exponent (11 bits) and the first 20 digits depends on the byte order of the machine. */
 export const upper = new Uint8Array(Uint32Array.of(1).buffer)[0] === 1 ? 1 : 0;

@@ -11,34 +11,47 @@ import type { Support } from './significant.js';
  */
 export function swapping(asked: Asked, finding: number, column: number) {
   const { table, view, exponents } = asked.posterior;
-  const power = asked.power(exponents.rows[finding]!);
-  /** The supports the row is already divided out of, with the least that P' of the pooled row is. */
-  const divided = new Map<Support, number>();
+  const exponent = exponents.rows[finding]!;
+  const power = asked.power(exponent);
+  /** For the supports it is already divided out of, the most that dividing can have added to a set. */
+  const gains = new Map<Support, number>();
 
   function divideOut(support: Support): number {
-    const { shares, work, divided: target } = support;
+    const { shares, work, divided } = support;
     const row = asked.row(view, finding);
     writeRow(work, support, row);
-    for (let p = 0; p < work.length; p += 1) target[p] = shares[p]! / power.of(work[p]!);
-    divided.set(support, row.least);
-    return row.least;
+    power.raise(work);
+    for (let p = 0; p < work.length; p += 1) divided[p] = shares[p]! / work[p]!;
+    const gain = row.least ** -exponent;
+    gains.set(support, gain);
+    return gain;
   }
 
   return (support: Support, other: View): Bounded<number> => {
-    const least = divided.get(support) ?? divideOut(support);
-    const holds = membership(table, support, column);
-    const { work, divided: shares } = support;
+    const gain = gains.get(support) ?? divideOut(support);
+    const { work, divided } = support;
     writeRow(work, support, asked.row(other, finding));
-    let total = 0;
-    let held = 0;
-    for (let p = 0; p < work.length; p += 1) {
-      const share = shares[p]! * power.of(work[p]!);
-      total += share;
-      held += share * holds[p]!;
-    }
-    // P' is at most 1, so no set left aside can have gained more than the pooled row took.
-    return { value: held / total, missed: support.aside / power.of(least) / total };
+    power.raise(work);
+    const { total, held } = sums(divided, work, membership(table, support, column));
+    // P' is at most 1, so multiplying the other row in adds nothing to what is aside.
+    return { value: held / total, missed: (support.aside * gain) / total };
   };
+}
+
+/** Σ shares × factors, over all sets and over those that hold. */
+function sums(
+  shares: Float64Array,
+  factors: Float64Array,
+  holds: Float64Array,
+): { total: number; held: number } {
+  let total = 0;
+  let held = 0;
+  for (let p = 0; p < shares.length; p += 1) {
+    const share = shares[p]! * factors[p]!;
+    total += share;
+    held += share * holds[p]!;
+  }
+  return { total, held };
 }
 
 /** For each set 1 where the column is the case in it, otherwise 0; worked out once for each support and column. */

@@ -13,18 +13,18 @@ export function withoutFinding(asked: Asked, support: Support, finding: number):
   const exponent = exponents.withoutOne[finding]!;
   const more = exponent - exponents.rows[finding]!;
   const group = more > 0 ? groupLogs.get(panel.findings[finding]!.group) : undefined;
-  const power = asked.power(exponent);
   const row = asked.row(view, finding);
   writeRow(work, support, row);
+  asked.power(exponent).raise(work);
   let total = 0;
   for (let p = 0; p < work.length; p += 1) {
     const others = group ? Math.exp(more * group[positions[p]!]!) : 1;
-    total += work[p] = (shares[p]! * others) / power.of(work[p]!);
+    total += work[p] = (shares[p]! * others) / work[p]!;
   }
   for (let p = 0; p < work.length; p += 1) work[p]! /= total;
   // P' of the others is at most 1, so no set left aside can have gained more than its own row took.
   return {
     value: marginals(table, support, work, work[0]!),
-    missed: support.aside / power.of(row.least) / total,
+    missed: support.aside / row.least ** exponent / total,
   };
 }

@@ -1,6 +1,6 @@
 import { inferAll } from 'bayesjs';
-import { assess } from '../assess.js';
-import { sixteenConditions, sixteenConditionsFolded } from '../testing/sixteen-conditions.js';
+import { assess } from '../../assess.js';
+import { sixteenConditions, sixteenConditionsFolded } from '../sixteen-conditions.js';
 import type { Measured } from './panels.js';
 import { timed } from './timed.js';
 

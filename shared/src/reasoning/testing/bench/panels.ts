@@ -1,5 +1,5 @@
-import { assess } from '../assess.js';
-import { type RandomShape, randomPanel } from '../testing/random-panel.js';
+import { assess } from '../../assess.js';
+import { type RandomShape, randomPanel } from '../random-panel.js';
 import { type Timing, timed } from './timed.js';
 
 export interface Measured extends Timing {

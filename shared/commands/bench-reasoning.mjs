@@ -1,4 +1,4 @@
 /** `npm run bench:reasoning`: how long assessments take, as a table or with --json as JSON. */
 import { importBuilt } from './built.mjs';
 
-await importBuilt('reasoning/bench/command.js');
+await importBuilt('reasoning/testing/bench/command.js');

@@ -8,7 +8,7 @@ import { existsSync, readdirSync, statSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import { fileURLToPath } from 'node:url';
 
-const workspace = new URL('../../', import.meta.url);
+const workspace = new URL('../', import.meta.url);
 const stamp = new URL('dist/.tsbuildinfo', workspace);
 
 function newestSource() {
