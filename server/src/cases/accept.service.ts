@@ -30,7 +30,7 @@ export class AcceptService {
   /**
    * The accepting chair becomes the chair of the case.
    * @throws Refusal 400 with every fault of the team, 409 `not-ready` with everything that is missing,
-   *   409 `wrong-state` when another chair was faster
+   *   404 when another chair was faster: the case is then on that chair’s desk alone
    */
   async accept(actor: Actor, caseId: string, input: Accept): Promise<Case> {
     const opened = await this.work.run(async (work) => {
