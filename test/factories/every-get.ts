@@ -3,7 +3,7 @@ import type { Readable } from 'node:stream';
 import type { RunningApp } from '../setup/app.js';
 import type { Agent } from './people.js';
 
-/** One answer as it came over the network. */
+/** One answer as it came over the network. Of a PDF, whose bytes are packed, the text says only that it is one. */
 export interface Answered {
   route: string;
   status: number;
@@ -42,7 +42,12 @@ export async function everyGet(
         .get(filled + query)
         .buffer(true)
         .parse(asText);
-      answers.push({ route: path + query, status: answer.status, text: String(answer.body) });
+      const text = String(answer.body);
+      answers.push({
+        route: path + query,
+        status: answer.status,
+        text: text.startsWith('%PDF') ? '%PDF' : text,
+      });
     }
   }
   return answers;

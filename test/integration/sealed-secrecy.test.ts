@@ -51,6 +51,8 @@ const long = 300_000;
 
 /** Opening an identity card stands in the trail; an export carries the moment at which it was made. */
 const moving = /identity|export/;
+/** The moment of asking, and when people were last seen at all: both move without anybody judging. */
+const clockText = /"(?:now|lastSeenAt)":"[^"]+"/g;
 
 let running: RunningApp;
 let case_: JudgedCase;
@@ -85,7 +87,7 @@ function spellings(outOf100: number): RegExp {
   const decimal = String(outOf100).replace('.', '\\.');
   const fraction = String(Math.round(outOf100 * 10)).padStart(3, '0');
   return new RegExp(
-    `(?<![\\d.:-])(?:${decimal}|0\\.${fraction}\\d*|${String(Number(fraction))})(?![\\d.a-z-])`,
+    `(?<![\\w.:-])(?:${decimal}|0\\.${fraction}\\d*|${String(Number(fraction))})(?![\\w.-])`,
   );
 }
 const secrets = [...secretNumbers.map(spellings), new RegExp(secretWords), new RegExp(typedNumber)];
@@ -93,7 +95,8 @@ const secrets = [...secretNumbers.map(spellings), new RegExp(secretWords), new R
 const walk = async (roundId: string, skip = /^$/): Promise<Map<string, Answered[]>> => {
   const ids = { caseId: case_.id, roundId, findingId: case_.findings[0]?.id ?? '', personId: ann.id };
   const answers = others.map(async ([who, { agent }]): Promise<[string, Answered[]]> => {
-    return [who, await everyGet(running, agent, ids, skip)];
+    const all = await everyGet(running, agent, ids, skip);
+    return [who, all.map((answer) => ({ ...answer, text: answer.text.replace(clockText, '') }))];
   });
   return new Map(await Promise.all(answers));
 };
