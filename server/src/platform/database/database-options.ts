@@ -10,6 +10,8 @@ export function databaseOptions(
     url,
     entities,
     timezone: 'Z',
+    // A calendar day stays the text it is: as a Date it would be yesterday in zones west of Greenwich.
+    dateStrings: ['DATE'],
     charset: 'utf8mb4',
     supportBigNumbers: true,
     bigNumberStrings: true,
