@@ -62,8 +62,8 @@ function FindingCard({ finding }: { finding: Finding }) {
       <p className="small soft">{group?.title}</p>
       <h2 className="ledger-name">{finding.title}</h2>
       <p className="small soft">
+        {unsaved.has(finding.id) && <b className="ledger-unsaved">Typed, not saved.</b>}
         {findingLine(finding, dayWords(format))}
-        {unsaved.has(finding.id) && <b className="ledger-unsaved">Typed, not saved</b>}
       </p>
       <CellList finding={finding} />
       <Button

@@ -19,8 +19,8 @@ export const FindingRow = memo(function FindingRow({ finding, row }: { finding: 
       <th scope="row" className="ledger-title" data-row={row} data-column={0} tabIndex={-1}>
         <span className="ledger-name">{finding.title}</span>
         <span className="ledger-line">
+          {unsaved.has(finding.id) && <b className="ledger-unsaved">Typed, not saved.</b>}
           {findingLine(finding, dayWords(format))}
-          {unsaved.has(finding.id) && <b className="ledger-unsaved">Typed, not saved</b>}
         </span>
       </th>
       {columns.map((column) => (

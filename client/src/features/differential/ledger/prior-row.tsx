@@ -13,8 +13,8 @@ export function PriorRow() {
       <th scope="row" className="ledger-title" data-row={0} data-column={0} tabIndex={-1}>
         <span className="ledger-name">Before any finding</span>
         <span className="ledger-line">
+          {unsaved.has('prior') && <b className="ledger-unsaved">Typed, not saved.</b>}
           {priorLine(differential)}
-          {unsaved.has('prior') && <b className="ledger-unsaved">Typed, not saved</b>}
         </span>
       </th>
       {columns.map((column) => (

@@ -13,6 +13,7 @@ import '../ledger/side.css';
 import '../editor/editor.css';
 import '../cards/cards.css';
 import '../prior-first/prior-first.css';
+import '../ledger/print.css';
 
 /** The differential: the ledger of a case. */
 export default function DifferentialRoute() {

@@ -1,5 +1,5 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { candidateSetSchema, type NewCandidate } from '@weighhouse/shared/contracts/findings';
+import { candidateSchema, type NewCandidate } from '@weighhouse/shared/contracts/findings';
 import { post } from '../../../lib/api';
 import { refreshEvidence } from './refresh-evidence';
 
@@ -7,7 +7,7 @@ import { refreshEvidence } from './refresh-evidence';
 export function useAddCandidate(caseId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: NewCandidate) => post(`/api/cases/${caseId}/candidates`, candidateSetSchema, body),
+    mutationFn: (body: NewCandidate) => post(`/api/cases/${caseId}/candidates`, candidateSchema, body),
     onSuccess: () => refreshEvidence(client, caseId),
   });
 }
