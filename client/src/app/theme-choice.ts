@@ -4,6 +4,8 @@ export type ThemeChoice = 'system' | 'light' | 'dark';
 
 const key = 'weighhouse.theme';
 const dark = matchMedia('(prefers-color-scheme: dark)');
+// Paper is white: a dark page would print light text on it.
+const paper = matchMedia('print');
 const listeners = new Set<() => void>();
 
 function choice(): ThemeChoice {
@@ -12,6 +14,7 @@ function choice(): ThemeChoice {
 }
 
 function appearance(): 'light' | 'dark' {
+  if (paper.matches) return 'light';
   const chosen = choice();
   if (chosen !== 'system') return chosen;
   return dark.matches ? 'dark' : 'light';
@@ -20,9 +23,11 @@ function appearance(): 'light' | 'dark' {
 function subscribe(listener: () => void): () => void {
   listeners.add(listener);
   dark.addEventListener('change', listener);
+  paper.addEventListener('change', listener);
   return () => {
     listeners.delete(listener);
     dark.removeEventListener('change', listener);
+    paper.removeEventListener('change', listener);
   };
 }
 

@@ -18,12 +18,12 @@ export function BothTexts({ theirs, mine, onKeepMine, onTakeTheirs, what = 'this
       <p className="failure-title">Somebody else changed {what} while you were writing. Choose what stays.</p>
       <div className="both-columns">
         <div>
-          <h3>Yours, not saved yet</h3>
+          <p className="row-title">Yours, not saved yet</p>
           {mine}
           <Button onClick={onKeepMine}>Keep mine</Button>
         </div>
         <div>
-          <h3>Saved meanwhile</h3>
+          <p className="row-title">Saved meanwhile</p>
           {theirs}
           <Button variant="outline" onClick={onTakeTheirs}>
             Take theirs

@@ -32,7 +32,7 @@ interface Props {
 export function ConfirmDialog({ open, onOpenChange, ...form }: Props) {
   return (
     <AlertDialog.Root open={open} onOpenChange={onOpenChange}>
-      <AlertDialog.Content className="confirm-dialog" maxWidth="480px">
+      <AlertDialog.Content className="confirm-dialog">
         <ConfirmForm
           {...form}
           onDone={() => {
@@ -115,7 +115,7 @@ function ConfirmForm(props: Omit<Props, 'open' | 'onOpenChange'> & { onDone: () 
           {verb}
         </Button>
         <AlertDialog.Cancel>
-          <Button variant="outline" type="button">
+          <Button variant="outline" color="gray" highContrast type="button">
             Cancel
           </Button>
         </AlertDialog.Cancel>

@@ -12,7 +12,7 @@ import { useMoveCase } from '../api/move-case';
 import { ConferenceField, type ConferenceTyped } from './conference-field';
 import { parseQuorum, readConference } from './conference-typed';
 import { TeamEditor } from './team-editor';
-import { inputOf, seatsOf, teamFaults } from './team-form';
+import { inputOf, type Seat, seatsOf, stillWrong, teamFaults } from './team-form';
 import { labelsOf } from './team-labels';
 
 /** Accepting a case: who judges it, who tells the patient, when it is discussed. The accepting chair leads it. */
@@ -24,6 +24,11 @@ export function AcceptForm({ of }: { of: Case }) {
   const [conference, setConference] = useState<ConferenceTyped>({ choice: '', at: '' });
   const [quorum, setQuorum] = useState(String(of.quorum));
   const [faults, setFaults] = useState<FieldFault[]>([]);
+
+  const changeSeats = (next: Seat[]) => {
+    setSeats(next);
+    setFaults((known) => stillWrong(known, next));
+  };
 
   const submit = async (event: SubmitEvent) => {
     event.preventDefault();
@@ -52,13 +57,16 @@ export function AcceptForm({ of }: { of: Case }) {
         You become its chair. Contributors get an e-mail with the case’s number and a link, nothing else.
       </p>
       <ErrorSummary faults={faults} labels={labelsOf(seats)} title="The case cannot be accepted yet" />
-      <TeamEditor seats={seats} faults={faults} weightsFrozen={false} onSeats={setSeats} />
+      <TeamEditor seats={seats} faults={faults} weightsFrozen={false} onSeats={changeSeats} />
       <section aria-label="Conference and quorum" className="team-rest">
         <ConferenceField
           value={conference}
           faults={faults}
           timeZone={format.timeZone}
-          onChange={setConference}
+          onChange={(typed) => {
+            setConference(typed);
+            setFaults((known) => known.filter((fault) => fault.path !== 'conferenceAt'));
+          }}
         />
         <FormField
           label="Quorum"

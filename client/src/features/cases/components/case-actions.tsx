@@ -1,7 +1,7 @@
 import { Button } from '@radix-ui/themes';
 import type { Case } from '@weighhouse/shared/contracts/cases';
 import { type ReactNode, useState } from 'react';
-import { Link } from 'react-router-dom';
+import { Link, useNavigate } from 'react-router-dom';
 import { ConfirmDialog } from '../../../components/confirm-dialog';
 import { useMoveCase } from '../api/move-case';
 
@@ -64,6 +64,7 @@ const moves: Asked[] = [
 export function CaseActions({ of }: { of: Case }) {
   const [asked, setAsked] = useState<Asked | null>(null);
   const move = useMoveCase(of.id);
+  const navigate = useNavigate();
   const may = (action: string) => of.abilities.includes(action);
   const accepting = may('case.accept');
   return (
@@ -105,7 +106,11 @@ export function CaseActions({ of }: { of: Case }) {
           verb={asked.verb}
           danger={asked.danger ?? false}
           wordsLabel={asked.wordsLabel}
-          onConfirm={({ words }) => move.mutateAsync({ move: asked.move, body: { words } })}
+          onConfirm={async ({ words }) => {
+            const moved = await move.mutateAsync({ move: asked.move, body: { words } });
+            // A chair who returned or declined a case is not on its team and cannot read it any more.
+            if (moved.parts.length === 0) await navigate('/');
+          }}
         >
           {asked.text}
         </ConfirmDialog>

@@ -9,6 +9,9 @@ export interface ConferenceTyped {
   at: string;
 }
 
+/** The choice and the date are two controls of one path of the contract, and each needs its own id. */
+const datePath = 'conferenceAt.date';
+
 interface Props {
   value: ConferenceTyped;
   faults: readonly FieldFault[];
@@ -35,8 +38,10 @@ export function ConferenceField({ value, faults, timeZone, onChange }: Props) {
       {value.choice === 'date' && (
         <FormField
           label="Date and time"
-          path="conferenceAt"
-          faults={faults}
+          path={datePath}
+          faults={faults.map((fault) =>
+            fault.path === 'conferenceAt' ? { ...fault, path: datePath } : fault,
+          )}
           hint={`On the clock of ${timeZone}`}
         >
           {(control) => (

@@ -7,7 +7,7 @@ import { FailureLine } from '../../../components/failure';
 import { isApiError } from '../../../lib/api';
 import { useSetTeam } from '../api/set-team';
 import { TeamEditor } from './team-editor';
-import { inputOf, seatsOf, teamFaults } from './team-form';
+import { inputOf, type Seat, seatsOf, stillWrong, teamFaults } from './team-form';
 import { labelsOf } from './team-labels';
 
 /** Changing the team of a case that is under way. */
@@ -16,6 +16,11 @@ export function TeamForm({ of }: { of: Case }) {
   const [seats, setSeats] = useState(() => seatsOf(of.team));
   const [faults, setFaults] = useState<FieldFault[]>([]);
   const sealed = of.round?.open === true && of.round.kind === 'sealed';
+
+  const changeSeats = (next: Seat[]) => {
+    setSeats(next);
+    setFaults((known) => stillWrong(known, next));
+  };
 
   const submit = async (event: SubmitEvent) => {
     event.preventDefault();
@@ -39,7 +44,7 @@ export function TeamForm({ of }: { of: Case }) {
           : 'A changed weight moves the pool at once. Everybody on the team can read the weights and their reasons.'}
       </p>
       <ErrorSummary faults={faults} labels={labelsOf(seats)} title="The team was not saved" />
-      <TeamEditor seats={seats} faults={faults} weightsFrozen={sealed} onSeats={setSeats} />
+      <TeamEditor seats={seats} faults={faults} weightsFrozen={sealed} onSeats={changeSeats} />
       {faults.length === 0 && <FailureLine error={save.error} />}
       <div className="actions team-rest">
         <Button type="submit" loading={save.isPending}>

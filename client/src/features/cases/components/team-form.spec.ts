@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { inputOf, parseWeight, type Seat, teamFaults } from './team-form';
+import { inputOf, parseWeight, type Seat, stillWrong, teamFaults } from './team-form';
 
 const seat = (personId: string, part: Seat['part'], weight = '1', reason = ''): Seat => ({
   personId,
@@ -40,6 +40,12 @@ describe('the team', () => {
     const heavier = [...whole, seat('c', 'contributor', '2')];
     expect(teamFaults(heavier).map(({ path }) => path)).toEqual(['seats.c.reason']);
     expect(teamFaults([...whole, seat('c', 'contributor', '2', 'Sees this weekly')])).toEqual([]);
+  });
+
+  it('takes a fault back as soon as it is mended', () => {
+    const faults = [...teamFaults([]), { path: 'quorum', message: 'x' }];
+    expect(stillWrong(faults, whole.slice(0, 3)).map(({ path }) => path)).toEqual(['liaisons', 'quorum']);
+    expect(stillWrong(faults, whole).map(({ path }) => path)).toEqual(['quorum']);
   });
 
   it('sends no referrer, and a weight for contributors alone', () => {

@@ -44,6 +44,13 @@ export function inputOf(seats: readonly Seat[]): TeamMemberInput[] {
     }));
 }
 
+/** Of the faults shown, those that these seats still have; faults of other fields stay. */
+export function stillWrong(faults: readonly FieldFault[], seats: readonly Seat[]): FieldFault[] {
+  const now = teamFaults(seats).map(({ path }) => path);
+  const ofTeam = (path: string) => /^(seats\.|contributors$|liaisons$)/.test(path);
+  return faults.filter(({ path }) => !ofTeam(path) || now.includes(path));
+}
+
 /** What is wrong with the team before it is sent; paths as `seats.<person>.weight` and `team`. */
 export function teamFaults(seats: readonly Seat[]): FieldFault[] {
   const contributors = seats.filter((seat) => seat.part === 'contributor');

@@ -30,7 +30,7 @@ export default function NewReferralPage() {
   };
 
   return (
-    <div className="page">
+    <div className="page new-referral">
       <PageTitle note="Begin with the question. Patient, consent, history and reports follow, saved as you write.">
         A new referral
       </PageTitle>

@@ -3,6 +3,7 @@ import { meSchema, type SignIn } from '@weighhouse/shared/contracts/people';
 import { request } from '../../../lib/api';
 import { decideSession } from '../../../lib/session';
 import { meQuery } from './get-me';
+import { leaveNothing } from './leave-nothing';
 
 const signIn = (body: SignIn) => request('POST', '/api/session', { schema: meSchema, body, wait: false });
 

@@ -5,6 +5,7 @@ import { forgetAll } from '../../../lib/kept';
 import { liveConnection } from '../../../lib/live-connection';
 import { decideSession } from '../../../lib/session';
 import { meQuery } from './get-me';
+import { leaveNothing } from './leave-nothing';
 
 /** Ends this session, or all of one's own. Nothing of the person stays in this browser. */
 export function useSignOut() {
@@ -19,8 +20,8 @@ export function useSignOut() {
       liveConnection.close();
       forgetAll();
       decideSession(false);
-      client.clear();
       client.setQueryData(meQuery.queryKey, null);
+      leaveNothing(client);
     },
   });
 }

@@ -26,8 +26,19 @@ describe('fileFault', () => {
 describe('uploadFault', () => {
   it('speaks by the id of the refusal', () => {
     const refusal = (id: string) => new ApiError(id, 'raw', { status: 400 });
-    expect(uploadFault(refusal('wrong-type'), 5)).toContain('by its content');
-    expect(uploadFault(refusal('too-large'), 30 * 1024 * 1024)).toContain('30.0 MB');
-    expect(uploadFault(refusal('offline'), 5)).toContain('offline');
+    expect(uploadFault(refusal('wrong-type'), 5).fault).toContain('by its content');
+    expect(uploadFault(refusal('too-large'), 30 * 1024 * 1024).fault).toContain('30.0 MB');
+    expect(uploadFault(refusal('offline'), 5).fault).toContain('offline');
+  });
+
+  it('offers to send again only what may go through then', () => {
+    const retry = (id: string) => uploadFault(new ApiError(id, 'raw', { status: 400 }), 5).retry;
+    expect([
+      retry('offline'),
+      retry('failed'),
+      retry('wrong-type'),
+      retry('too-large'),
+      retry('wrong-state'),
+    ]).toEqual([true, true, false, false, false]);
   });
 });

@@ -1,6 +1,6 @@
 import { reportKinds, reportMediaTypes, reportSizeLimit } from '@weighhouse/shared/contracts/reports';
 import { isApiError } from '../../../lib/api-error';
-import { errorLine } from '../../../lib/error-words';
+import { errorLine, errorWords } from '../../../lib/error-words';
 import { listed, sizeWords } from '../../../lib/words';
 
 const labels = reportKinds.map((kind) => kind.label);
@@ -33,10 +33,11 @@ export function fileFault({ name, type, size }: Named): string | null {
   return known ? null : wrongType;
 }
 
-/** Why an upload failed, with the way out. */
-export function uploadFault(error: unknown, size: number): string {
-  if (isApiError(error, 'too-large')) return tooLarge(size);
-  if (isApiError(error, 'wrong-type')) return wrongType;
-  if (isApiError(error, 'offline')) return 'Not sent: offline or the server cannot be reached. Try again.';
-  return errorLine(error);
+/** Why an upload failed, with the way out, and whether sending the same file again can help. */
+export function uploadFault(error: unknown, size: number): { fault: string; retry: boolean } {
+  if (isApiError(error, 'too-large')) return { fault: tooLarge(size), retry: false };
+  if (isApiError(error, 'wrong-type')) return { fault: wrongType, retry: false };
+  if (isApiError(error, 'offline'))
+    return { fault: 'Not sent: offline or the server cannot be reached. Try again.', retry: true };
+  return { fault: errorLine(error), retry: errorWords(error).retry };
 }

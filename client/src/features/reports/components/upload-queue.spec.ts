@@ -25,7 +25,12 @@ function sender() {
 function begin(check: (one: File) => string | null = () => null) {
   const { open, send } = sender();
   const onDone = vi.fn();
-  const queue = new UploadQueue({ send, check, faultOf: () => 'failed because', onDone });
+  const queue = new UploadQueue({
+    send,
+    check,
+    faultOf: () => ({ fault: 'failed because', retry: true }),
+    onDone,
+  });
   return { open, onDone, queue };
 }
 

@@ -15,7 +15,8 @@ interface Options {
   send: (file: File, onProgress: (share: number) => void, signal: AbortSignal) => Promise<unknown>;
   /** What is wrong with a file before it is sent. */
   check: (file: File) => string | null;
-  faultOf: (error: unknown, file: File) => string;
+  /** Why it failed, and whether sending it again can help. */
+  faultOf: (error: unknown, file: File) => { fault: string; retry: boolean };
   onDone: () => void;
   /** How many are sent at once. */
   atOnce?: number;
@@ -81,7 +82,7 @@ export class UploadQueue {
       this.#options.onDone();
     } catch (error) {
       // A cancelled one is off the list already, so this changes nothing for it.
-      this.#change(id, { state: 'failed', fault: this.#options.faultOf(error, file), retry: true });
+      this.#change(id, { state: 'failed', ...this.#options.faultOf(error, file) });
     } finally {
       this.#aborts.delete(id);
       this.#start();
