@@ -158,7 +158,8 @@ describe('the moves of a case', () => {
         [people.referrer.email, `Case ${number} has been accepted`],
       ].sort(),
     );
-    for (const { text, subject } of sent) expect(text + subject).not.toMatch(/fever|illness|female|four months/i);
+    for (const { text, subject } of sent)
+      expect(text + subject).not.toMatch(/fever|illness|female|four months/i);
   });
 
   it('two chairs who accept at once: one becomes the chair', async () => {

@@ -59,13 +59,15 @@ export function caseSearch(
 function sorted(search: SelectQueryBuilder<CaseFile>, sort: string): SelectQueryBuilder<CaseFile> {
   const descending = sort.startsWith('-');
   const expression = orders[descending ? sort.slice(1) : sort] ?? 'c.updatedAt';
-  return search
-    .addSelect(`(${expression}) IS NULL`, 'sort_missing')
-    // In brackets, or a plain column would be read as renamed and missing from the row.
-    .addSelect(`(${expression})`, 'sort_key')
-    .orderBy('sort_missing', 'ASC')
-    .addOrderBy('sort_key', descending ? 'DESC' : 'ASC')
-    .addOrderBy('c.id', 'ASC');
+  return (
+    search
+      .addSelect(`(${expression}) IS NULL`, 'sort_missing')
+      // In brackets, or a plain column would be read as renamed and missing from the row.
+      .addSelect(`(${expression})`, 'sort_key')
+      .orderBy('sort_missing', 'ASC')
+      .addOrderBy('sort_key', descending ? 'DESC' : 'ASC')
+      .addOrderBy('c.id', 'ASC')
+  );
 }
 
 /** Percent, underscore and backslash mean themselves in what people search for. */
