@@ -12,7 +12,7 @@ export async function refer(page: Page, report: Buffer): Promise<string> {
   await page.waitForURL(/\/cases\/[0-9a-f-]{36}\/edit/);
   await page.getByLabel('Age').fill('47');
   await page.getByLabel('Sex').selectOption('female');
-  await page.getByRole('radio', { name: 'Within a week' }).click();
+  await page.getByRole('radio', { name: 'Within 1 week' }).click();
   await page.getByLabel('Why so urgent').fill('Weight is falling.');
   await page.getByRole('radio', { name: 'Yes, signed' }).click();
   await page.getByLabel('Given on').fill(new Date().toISOString().slice(0, 10));
