@@ -38,3 +38,17 @@ export function chooseTheme(chosen: ThemeChoice): void {
 
 export const useThemeChoice = () => useSyncExternalStore(subscribe, choice);
 export const useAppearance = () => useSyncExternalStore(subscribe, appearance);
+
+/**
+ * Paper is white, and a dark page would print light text on it. Past React, because the paper is laid out as soon as
+ * the event's listeners return.
+ */
+const swapOnPaper = (from: string, to: string) => {
+  for (const theme of document.querySelectorAll(`.radix-themes.${from}`)) theme.classList.replace(from, to);
+};
+window.addEventListener('beforeprint', () => {
+  swapOnPaper('dark', 'light');
+});
+window.addEventListener('afterprint', () => {
+  if (appearance() === 'dark') swapOnPaper('light', 'dark');
+});

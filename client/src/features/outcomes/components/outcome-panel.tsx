@@ -25,7 +25,7 @@ export function OutcomePanel({ caseId, mayRecord }: Props) {
   return (
     <>
       {data && <Recorded outcome={data} />}
-      <section className="outcome" aria-label="Record the outcome">
+      <section className="outcome no-print" aria-label="Record the outcome">
         <h2>
           {data
             ? 'The case was reopened and closed again since'

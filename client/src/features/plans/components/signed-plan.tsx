@@ -1,6 +1,7 @@
 import type { Plan } from '@weighhouse/shared/contracts/plans';
 import { Caution } from '../../../components/caution';
 import { useFormat } from '../../../lib/use-format';
+import { capital } from '../../../lib/words';
 import { stanceCount } from '../model/plan-words';
 import { ActionList } from './action-list';
 import { PlanPart, PlanText } from './plan-text';
@@ -68,7 +69,11 @@ function Body({ caseId, plan, meId, headed = true }: Omit<Props, 'newest'> & { h
         <PlanPart title="Where the panel stood when it was signed">
           <StandingList
             label={`Where the panel stood at plan ${String(plan.number)}`}
-            standing={plan.standing.map((one, place) => ({ ...one, none: place === last }))}
+            standing={plan.standing.map((one, place) => ({
+              share: one.share,
+              name: capital(one.name),
+              none: place === last,
+            }))}
           />
           {plan.method !== null && (
             <p className="soft small">

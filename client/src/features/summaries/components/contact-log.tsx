@@ -6,7 +6,8 @@ import { howWords, understoodWords } from '../model/summary-words';
 export function ContactLog({ contacts }: { contacts: Summary['contacts'] }) {
   const format = useFormat();
   if (contacts.length === 0) return <p className="soft">Nobody has tried to reach the patient yet.</p>;
-  const newestFirst = contacts.toSorted((one, other) => Date.parse(other.at) - Date.parse(one.at));
+  // The server has them oldest first; of two in the same minute the later one is first here.
+  const newestFirst = contacts.toReversed().sort((one, other) => Date.parse(other.at) - Date.parse(one.at));
   return (
     <ol className="contact-log">
       {newestFirst.map((contact) => (

@@ -17,6 +17,7 @@ export function Contacts({ summary }: { summary: Summary }) {
         <div className="actions">
           {mayTell && (
             <Button
+              variant={state === 'told' ? 'outline' : 'solid'}
               onClick={() => {
                 setForm('told');
               }}
