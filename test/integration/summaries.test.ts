@@ -1,0 +1,343 @@
+import { type Summary, summarySchema, tellListSchema } from '@weighhouse/shared/contracts/summaries';
+import { openApiDocument } from '@weighhouse/server/platform/http/open-api';
+import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import {
+  acceptedCase,
+  type JudgedCase,
+  seat,
+  type SeatedPerson,
+  unsealedCase,
+} from '../factories/judgements.js';
+import { concludedCase, planWords } from '../factories/plans.js';
+import { type RunningApp, startApp } from '../setup/app.js';
+import { mailbox } from '../setup/mailbox.js';
+
+let running: RunningApp;
+const box = mailbox();
+
+beforeAll(async () => {
+  running = await startApp();
+});
+afterAll(() => running.close());
+beforeEach(() => {
+  box.clear();
+});
+afterEach(() => {
+  running.clock.reset();
+});
+
+const path = (of: JudgedCase): string => `/api/cases/${of.id}/summary`;
+const errorOf = (body: unknown) =>
+  (body as { error: { id: string; fields?: { path: string }[]; current?: unknown } }).error;
+
+async function read(case_: JudgedCase, person: SeatedPerson): Promise<Summary> {
+  const { body } = await person.agent.get(path(case_)).expect(200);
+  return summarySchema.parse(body);
+}
+
+async function save(
+  case_: JudgedCase,
+  input: { version: number; body: string; ready?: boolean },
+): Promise<Summary> {
+  const { body } = await case_.liaison.agent.put(path(case_)).send(input).expect(200);
+  return summarySchema.parse(body);
+}
+
+async function approve(case_: JudgedCase, version: number): Promise<Summary> {
+  const { body } = await case_.chair.agent
+    .post(`${path(case_)}/approve`)
+    .send({ version })
+    .expect(200);
+  return summarySchema.parse(body);
+}
+
+const contact = (change: object = {}) => ({
+  at: running.clock.now().toISOString(),
+  how: 'telephone',
+  reached: true,
+  understood: 'partly',
+  questions: 'Can I travel?',
+  notes: 'Her daughter listened too.',
+  ...change,
+});
+
+async function letterTo(person: SeatedPerson): Promise<{ subject: string; text: string }[]> {
+  await running.outbox.flush();
+  await running.outbox.flush();
+  return (await box.messages()).filter(({ to }) => to.includes(person.email));
+}
+
+describe('the summary', () => {
+  it('is nothing before a plan is signed', async () => {
+    const case_ = await unsealedCase(running);
+    const summary = await read(case_, case_.liaison);
+    expect(summary).toMatchObject({
+      state: 'none',
+      version: 0,
+      body: '',
+      planNumber: null,
+      safetyNet: null,
+      actions: [],
+    });
+    await case_.liaison.agent.put(path(case_)).send({ version: 0, body: 'Too early' }).expect(409);
+    const early = await acceptedCase(running, { contributors: 2 });
+    await early.liaison.agent.get(path(early)).expect(409);
+  });
+
+  it('is drafted from the signed plan in plain words: what was found, how sure, what is next, when to get help', async () => {
+    const case_ = await concludedCase(running);
+    const summary = await read(case_, case_.liaison);
+    expect(summary).toMatchObject({
+      state: 'draft',
+      version: 0,
+      planNumber: 1,
+      safetyNet: planWords.safetyNet,
+    });
+    expect(summary.body).toContain(`The best explanation so far is this: ${planWords.workingDiagnosis}.`);
+    expect(summary.body).toMatch(/About \d+ of them would have this\./);
+    expect(summary.body).toContain('– A blood test every two weeks, by 12 March 2027.');
+    expect(summary.body).toContain(planWords.safetyNet);
+    expect(summary.body).toContain('does not replace the advice of the people who treat you');
+    // What does not concern the patient stays out of the text and of the list.
+    expect(JSON.stringify(summary)).not.toContain(planWords.forDoctors);
+    expect(summary.actions.map(({ what, mine }) => [what, mine])).toEqual([[planWords.forPatient, false]]);
+    expect(summary.abilities).toEqual(['summary.read', 'summary.write', 'summary.tell']);
+  });
+
+  it('goes from the liaison’s hand to the chair’s approval to the patient, with letters of number and link', async () => {
+    const case_ = await concludedCase(running);
+    const saved = await save(case_, { version: 0, body: 'You have an illness of the joints.' });
+    expect(saved).toMatchObject({ state: 'draft', version: 1 });
+    await letterTo(case_.chair);
+    box.clear();
+    const handed = await save(case_, { version: 1, body: saved.body, ready: true });
+    expect(handed.state).toBe('waiting');
+    const [asked] = await letterTo(case_.chair);
+    expect(asked?.subject).toBe(`The summary of case ${case_.number} waits for your approval`);
+    expect(asked?.text).not.toMatch(/joints/);
+    const early = await case_.liaison.agent
+      .post(`${path(case_)}/told`)
+      .send(contact())
+      .expect(409);
+    expect(errorOf(early.body).id).toBe('wrong-state');
+    const approved = await approve(case_, handed.version);
+    expect(approved).toMatchObject({ state: 'approved', approvedBy: case_.chair.name, body: saved.body });
+    expect((await letterTo(case_.liaison)).at(-1)?.subject).toBe(
+      `The summary of case ${case_.number} is approved and can be told`,
+    );
+    const { body } = await case_.liaison.agent
+      .post(`${path(case_)}/told`)
+      .send(contact())
+      .expect(200);
+    const told = summarySchema.parse(body);
+    expect(told.state).toBe('told');
+    expect(told.toldAt).not.toBeNull();
+    expect(told.contacts).toMatchObject([
+      {
+        how: 'telephone',
+        reached: true,
+        told: true,
+        understood: 'partly',
+        questions: 'Can I travel?',
+        by: case_.liaison.name,
+      },
+    ]);
+    // What was told stays as it was; it can be told again.
+    await case_.liaison.agent.put(path(case_)).send({ version: told.version, body: 'Changed' }).expect(409);
+    await case_.liaison.agent
+      .post(`${path(case_)}/told`)
+      .send(contact({ how: 'meeting' }))
+      .expect(200);
+    expect((await read(case_, case_.liaison)).toldAt).toBe(told.toldAt);
+  });
+
+  it('is approved in the version that the chair read; a change of an approved text needs approval again', async () => {
+    const case_ = await concludedCase(running);
+    const first = await save(case_, { version: 0, body: 'First', ready: true });
+    const second = await save(case_, { version: first.version, body: 'Second' });
+    expect(second.state).toBe('waiting');
+    const stale = await case_.chair.agent
+      .post(`${path(case_)}/approve`)
+      .send({ version: first.version })
+      .expect(409);
+    expect(errorOf(stale.body).id).toBe('stale');
+    expect(summarySchema.parse(errorOf(stale.body).current).body).toBe('Second');
+    const approved = await approve(case_, second.version);
+    await case_.chair.agent
+      .post(`${path(case_)}/approve`)
+      .send({ version: approved.version })
+      .expect(409);
+    const third = await save(case_, { version: approved.version, body: 'Third' });
+    expect(third).toMatchObject({ state: 'draft', approvedAt: null, approvedBy: null });
+    await case_.liaison.agent
+      .post(`${path(case_)}/told`)
+      .send(contact())
+      .expect(409);
+  });
+
+  it('comes back with the chair’s words, and they go when it is handed in again', async () => {
+    const case_ = await concludedCase(running);
+    const { version } = await save(case_, { version: 0, body: 'Text', ready: true });
+    await case_.chair.agent
+      .post(`${path(case_)}/return`)
+      .send({ words: '' })
+      .expect(400);
+    await case_.chair.agent
+      .post(`${path(case_)}/return`)
+      .send({ words: 'Say more of the spleen.' })
+      .expect(200);
+    const returned = await read(case_, case_.liaison);
+    expect(returned).toMatchObject({
+      state: 'draft',
+      returnedWords: 'Say more of the spleen.',
+      body: 'Text',
+    });
+    expect((await letterTo(case_.liaison)).at(-1)?.text).not.toMatch(/spleen/);
+    await case_.liaison.agent.put(path(case_)).send({ version, body: 'Old' }).expect(409);
+    const again = await save(case_, { version: returned.version, body: 'Longer', ready: true });
+    expect(again).toMatchObject({ state: 'waiting', returnedWords: null });
+  });
+
+  it('refuses the second of two writers with the text as it stands, and an empty text for approval', async () => {
+    const case_ = await concludedCase(running);
+    const write = (body: string) => case_.liaison.agent.put(path(case_)).send({ version: 0, body });
+    const responses = await Promise.all([write('One'), write('Two')]);
+    expect(responses.map(({ status }) => status).sort()).toEqual([200, 409]);
+    const won = summarySchema.parse(responses.find(({ status }) => status === 200)?.body);
+    const lost = errorOf(responses.find(({ status }) => status === 409)?.body);
+    expect([lost.id, summarySchema.parse(lost.current).body]).toEqual(['stale', won.body]);
+    const empty = await case_.liaison.agent
+      .put(path(case_))
+      .send({ version: 1, body: '  ', ready: true })
+      .expect(400);
+    expect(errorOf(empty.body).fields?.map((fault) => fault.path)).toEqual(['body']);
+  });
+
+  it('is written, approved and told by the right part alone', async () => {
+    const case_ = await concludedCase(running);
+    const { version } = await save(case_, { version: 0, body: 'Text', ready: true });
+    const stranger = await seat(running, ['liaison', 'chair']);
+    const statuses = async (person: SeatedPerson) => [
+      (await person.agent.get(path(case_))).status,
+      (await person.agent.put(path(case_)).send({ version, body: 'X' })).status,
+      (await person.agent.post(`${path(case_)}/approve`).send({ version })).status,
+      (await person.agent.post(`${path(case_)}/return`).send({ words: 'X' })).status,
+      (await person.agent.post(`${path(case_)}/told`).send(contact())).status,
+      (await person.agent.post(`${path(case_)}/contacts`).send(contact())).status,
+    ];
+    expect(await statuses(case_.contributors[0]!)).toEqual([200, 403, 403, 403, 403, 403]);
+    expect(await statuses(case_.referrer)).toEqual([200, 403, 403, 403, 403, 403]);
+    expect(await statuses(stranger)).toEqual([404, 404, 404, 404, 404, 404]);
+    await case_.chair.agent.put(path(case_)).send({ version, body: 'X' }).expect(403);
+    await case_.liaison.agent
+      .post(`${path(case_)}/approve`)
+      .send({ version })
+      .expect(403);
+    await case_.liaison.agent
+      .post(`${path(case_)}/contacts`)
+      .send(contact())
+      .expect(200);
+    // How the patient was reached is no matter of the contributors.
+    expect((await read(case_, case_.contributors[0]!)).contacts).toEqual([]);
+    expect((await read(case_, case_.referrer)).contacts).toHaveLength(1);
+  });
+});
+
+describe('the contact log', () => {
+  it('keeps attempts, and refuses what cannot have happened', async () => {
+    const case_ = await concludedCase(running);
+    const log = (change: object) => case_.liaison.agent.post(`${path(case_)}/contacts`).send(contact(change));
+    await log({ reached: false, understood: null, questions: '', notes: 'Nobody answered.' }).expect(200);
+    const future = new Date(running.clock.now().getTime() + 3_600_000).toISOString();
+    for (const [change, at] of [
+      [{ at: future }, 'at'],
+      [{ how: 'pigeon' }, 'how'],
+      [{ reached: 'yes' }, 'reached'],
+      [{ understood: 'maybe' }, 'understood'],
+    ] as const) {
+      const { body } = await log(change).expect(400);
+      expect(errorOf(body).fields?.map((fault) => fault.path)).toEqual([at]);
+    }
+    const { version } = await save(case_, { version: 0, body: 'Text', ready: true });
+    await approve(case_, version);
+    const unreached = await case_.liaison.agent
+      .post(`${path(case_)}/told`)
+      .send(contact({ reached: false }))
+      .expect(400);
+    expect(errorOf(unreached.body).fields?.map((fault) => fault.path)).toEqual(['reached']);
+    const { contacts, state } = await read(case_, case_.liaison);
+    expect([state, contacts.map(({ told, notes }) => [told, notes])]).toEqual([
+      'approved',
+      [[false, 'Nobody answered.']],
+    ]);
+  });
+});
+
+describe('the liaison', () => {
+  it('has a list of numbers, and how far each is', async () => {
+    const case_ = await concludedCase(running, { ownPeople: true });
+    const tell = async () => {
+      const { body } = await case_.liaison.agent.get('/api/tell').expect(200);
+      expect(JSON.stringify(body)).not.toMatch(/Still|fever|blood|spleen/i);
+      return tellListSchema.parse(body).items;
+    };
+    expect(await tell()).toMatchObject([
+      { caseId: case_.id, number: case_.number, state: 'draft', hasPlan: true, attempts: 0 },
+    ]);
+    const { version } = await save(case_, { version: 0, body: 'Text', ready: true });
+    await approve(case_, version);
+    await case_.liaison.agent
+      .post(`${path(case_)}/contacts`)
+      .send(contact({ reached: false }))
+      .expect(200);
+    expect(await tell()).toMatchObject([{ state: 'approved', attempts: 1 }]);
+    const other = await seat(running, 'liaison');
+    expect((await other.agent.get('/api/tell').expect(200)).body).toEqual({ items: [] });
+  });
+
+  it('reaches nothing else of the case through any route', async () => {
+    const case_ = await concludedCase(running);
+    const { agent } = case_.liaison;
+    const at = `/api/cases/${case_.id}`;
+    const open = ['/api/cases/{caseId}/summary', '/api/cases/{caseId}/identity', '/api/cases/{caseId}/trail'];
+    const routes = Object.entries(openApiDocument(running.app).paths)
+      .filter(([route, item]) => route.startsWith('/api/cases/{caseId}') && 'get' in item)
+      .map(([route]) => route);
+    expect(routes.length).toBeGreaterThan(10);
+    for (const route of routes) {
+      const { status } = await agent.get(`${route.replace('{caseId}', case_.id)}?format=fhir`);
+      expect([route, status]).toEqual([route, open.includes(route) ? 200 : 403]);
+    }
+    for (const format of ['pdf', 'letter', 'panel'])
+      await agent.get(`${at}/export?format=${format}`).expect(403);
+    const { body: cases } = await agent.get('/api/cases').expect(200);
+    expect(cases).toMatchObject({ items: [], total: 0 });
+    const { body: today } = await agent.get('/api/today').expect(200);
+    expect(JSON.stringify(today)).not.toMatch(/Still|fever|blood|spleen|marrow|lymphoma/i);
+    const { body: trail } = await agent.get(`${at}/trail`).expect(200);
+    expect(JSON.stringify(trail)).not.toMatch(/Still|fever|blood|spleen|marrow|lymphoma/i);
+  });
+});
+
+describe('a reopened case', () => {
+  it('gets a summary of its own for the later plan; the first stays with its contacts', async () => {
+    const case_ = await concludedCase(running);
+    const { version } = await save(case_, { version: 0, body: 'Of plan 1', ready: true });
+    await approve(case_, version);
+    await case_.liaison.agent
+      .post(`${path(case_)}/told`)
+      .send(contact())
+      .expect(200);
+    const at = `/api/cases/${case_.id}`;
+    await case_.chair.agent.post(`${at}/reopen`).send({ words: 'New result.' }).expect(200);
+    expect(await read(case_, case_.liaison)).toMatchObject({
+      body: 'Of plan 1',
+      state: 'told',
+      abilities: ['summary.read'],
+    });
+    await case_.liaison.agent
+      .post(`${path(case_)}/contacts`)
+      .send(contact())
+      .expect(409);
+  });
+});
