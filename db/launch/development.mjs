@@ -10,13 +10,12 @@ import { waitUntil } from './waiting.mjs';
  *
  * @param {{ settings: import('./environment.mjs').Settings, processes: import('./processes.mjs').Processes,
  *   env: NodeJS.ProcessEnv }} options
- * @returns {Promise<import('./processes.mjs').Child[]>}
  */
 export async function startDevelopment({ settings, processes, env }) {
   const address = { host: '127.0.0.1', port: await freePort() };
   const serverEnv = { ...env, HOST: address.host, PORT: String(address.port) };
   const node = { program: process.execPath, graceMs: 15_000 };
-  const compiler = processes.start({
+  processes.start({
     ...node,
     name: 'The compiler',
     args: [...code.command, '--watch', '--preserveWatchOutput'],
@@ -36,5 +35,4 @@ export async function startDevelopment({ settings, processes, env }) {
     env: { ...env, API_URL: `http://${address.host}:${address.port}` },
   });
   await waitUntil(() => isReady(settings), { what: 'Vite', child: pages });
-  return [compiler, server, pages];
 }

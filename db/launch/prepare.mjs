@@ -18,14 +18,16 @@ const preparation = ({ demo }) =>
  * is left alone.
  *
  * @param {import('./environment.mjs').Settings} settings
- * @param {{ processes: import('./processes.mjs').Processes, env: NodeJS.ProcessEnv }} options
+ * @param {{ processes: import('./processes.mjs').Processes, env: NodeJS.ProcessEnv,
+ *   say: (line: string) => void }} options
  * @throws {import('./fault.mjs').LaunchFault} with the command's last words
  */
-export async function prepareDatabase(settings, { processes, env }) {
+export async function prepareDatabase(settings, { processes, env, say }) {
   const { dataDirectory } = settings;
   const mark = path.join(dataPaths(dataDirectory).database, 'prepared');
   const wanted = preparation(settings);
   if (settings.ownDatabase && existsSync(mark) && readFileSync(mark, 'utf8') === wanted) return;
+  say(settings.demo ? 'Preparing the database and the demo.' : 'Preparing the database.');
   const commands = { processes, env, dataDirectory };
   await runBuilt({ what: 'Migrating the database', file: 'db/dist/migrate.js', ...commands });
   if (settings.demo) await runBuilt({ what: 'Seeding the demo', file: 'db/dist/seed-demo.js', ...commands });

@@ -88,6 +88,12 @@ export function createProcesses({ changed = () => undefined } = {}) {
   /** @type {Child[]} */
   const running = [];
   let closing = false;
+  /** @type {(child: Child) => void} */
+  let tellLost = () => undefined;
+  /** @type {Promise<Child>} */
+  const lost = new Promise((resolve) => {
+    tellLost = resolve;
+  });
 
   const tell = () => changed(running.map(({ name, identity }) => ({ name, ...identity })));
 
@@ -141,11 +147,15 @@ export function createProcesses({ changed = () => undefined } = {}) {
       over = true;
       running.splice(running.indexOf(entry), 1);
       tell();
+      if (!wholeGroup && !closing) tellLost(entry);
     });
     return entry;
   }
 
   return {
+    /** Settles with the first of those that should keep running and did not. */
+    lost,
+
     /**
      * Starts something that keeps running.
      *

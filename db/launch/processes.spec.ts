@@ -78,6 +78,17 @@ describe('the processes of a launch', () => {
     expect(one && isRunning(one)).toBe(false);
   });
 
+  it('are missed when one of them ends by itself, and not when all are stopped', async () => {
+    const processes = createProcesses();
+    await start(processes, 'database', '');
+    const server = await start(processes, 'server', 'setTimeout(() => process.exit(1), 200)');
+    expect(await processes.lost).toBe(server);
+    const others = createProcesses();
+    await start(others, 'database', '');
+    await others.stopAll();
+    expect(await Promise.race([others.lost, delay(100, 'nobody')])).toBe('nobody');
+  });
+
   it('end with the launcher even when it is killed outright', async () => {
     const outer = createProcesses();
     const module = new URL('processes.mjs', import.meta.url).href;

@@ -21,7 +21,6 @@ const say = (line) => console.log(line);
 /**
  * @param {import('./environment.mjs').Settings} settings
  * @param {Awaited<ReturnType<typeof beginLaunch>>} launch
- * @returns {Promise<import('./processes.mjs').Child[]>} what must keep running
  */
 async function bringUp(settings, { processes, record }) {
   const { dataDirectory } = settings;
@@ -35,8 +34,11 @@ async function bringUp(settings, { processes, record }) {
   ]);
   record.setServices(services);
   const env = serverEnvironment(settings, { env: process.env, secrets, services });
-  await prepareDatabase(settings, { processes, env });
-  if (settings.dev) return startDevelopment({ settings, processes, env });
+  await prepareDatabase(settings, { processes, env, say });
+  if (settings.dev) {
+    await startDevelopment({ settings, processes, env });
+    return;
+  }
   const server = processes.start({
     name: 'The server',
     program: process.execPath,
@@ -46,7 +48,6 @@ async function bringUp(settings, { processes, record }) {
     graceMs: 20_000,
   });
   await waitUntil(() => isReady(settings), { what: 'The server', child: server });
-  return [server];
 }
 
 async function main() {
@@ -62,9 +63,9 @@ async function main() {
   });
   try {
     await requireFreePort(settings);
-    const essential = await bringUp(settings, launch);
+    await bringUp(settings, launch);
     say(welcome(settings));
-    const lost = await Promise.race([stopped, ...essential.map((child) => child.ending.then(() => child))]);
+    const lost = await Promise.race([stopped, launch.processes.lost]);
     if (lost && !stopping)
       throw new LaunchFault(`${lost.name} stopped unexpectedly.${logTail(lost.logFile)}`);
     await stopped;
