@@ -16,9 +16,8 @@ describe('a fixed power', () => {
   it.each([1, 0.8, 0.5, 0.3, 0.18, 0.0123, 0])('of %d is as exact as Math.pow', (exponent) => {
     const raised = Float64Array.from(numbers);
     new FixedPower(exponent).raise(raised);
-    numbers.forEach((x, index) => {
-      expect(Math.abs(raised[index]! / x ** exponent - 1), `${x} ^ ${exponent}`).toBeLessThan(1e-15);
-    });
+    const wrong = numbers.filter((x, index) => !(Math.abs(raised[index]! / x ** exponent - 1) < 1e-15));
+    expect(wrong).toEqual([]);
   });
 
   it('takes what rounding makes of 1', () => {
@@ -35,9 +34,10 @@ describe('a fast logarithm', () => {
       2 ** -1022,
       ...Array.from({ length: 20_000 }, () => Math.exp(-700 * random())),
     ];
-    for (const x of numbers) {
+    const wrong = numbers.filter((x) => {
       const exact = Math.log(x);
-      expect(Math.abs(fastLog(x) - exact), `ln ${x}`).toBeLessThanOrEqual(1e-15 + 4e-16 * Math.abs(exact));
-    }
+      return !(Math.abs(fastLog(x) - exact) <= 1e-15 + 4e-16 * Math.abs(exact));
+    });
+    expect(wrong).toEqual([]);
   });
 });

@@ -3,43 +3,50 @@ import type { Assessment } from '../assessment.js';
 
 /** No NaN, Infinity or negative share anywhere, and every distribution sums to 1. */
 export function expectSound(assessment: Assessment): void {
-  expectFinite(assessment, '');
-  const oneCause =
-    assessment.explains.length === 0 && assessment.sets.every(({ members }) => members.length < 2);
-  expectSumsToOne(assessment.pooledPrior, 'pooledPrior');
-  for (const cell of Object.values(assessment.pooledCells).flat()) expectSumsToOne(cell, 'pooledCells');
-  const standings = [
-    assessment.standing,
-    assessment.linearPool,
-    ...Object.values(assessment.own),
-    ...Object.values(assessment.without.findings),
-    ...Object.values(assessment.without.contributors).filter((one) => one !== null),
-    ...assessment.nextTests.flatMap(({ levels }) => levels.map(({ standing }) => standing)),
+  expect(faults(assessment)).toEqual([]);
+}
+
+function faults(assessment: Assessment): string[] {
+  const { explains, sets, pooledPrior, pooledCells, nextTests, range, disagreementBits } = assessment;
+  const oneCause = explains.length === 0 && sets.every(({ members }) => members.length < 2);
+  const distributions = [
+    pooledPrior,
+    ...Object.values(pooledCells).flat(),
+    ...nextTests.map(({ levels }) => levels.map(({ p }) => p)),
+    ...(oneCause ? standingsOf(assessment) : []),
   ];
-  for (const standing of standings) {
-    for (const share of standing) expect(share, 'a share').toBeGreaterThanOrEqual(0);
-    for (const share of standing) expect(share, 'a share').toBeLessThanOrEqual(1 + 1e-12);
-    if (oneCause) expectSumsToOne(standing, 'a standing');
-  }
-  for (const { bits, leaderChanges, levels } of assessment.nextTests) {
-    expect(bits).toBeGreaterThanOrEqual(0);
-    expect(leaderChanges).toBeGreaterThanOrEqual(0);
-    expectSumsToOne(
-      levels.map(({ p }) => p),
-      'the levels of a test',
-    );
-  }
-  expect(assessment.disagreementBits).toBeGreaterThanOrEqual(0);
-  for (const { low, high } of assessment.range) expect(low).toBeLessThanOrEqual(high);
+  const shares = [...standingsOf(assessment), ...distributions].flat();
+  const amounts = [
+    ...nextTests.flatMap(({ bits, leaderChanges }) => [bits, leaderChanges]),
+    disagreementBits,
+  ];
+  return [
+    ...notFinite(assessment, 'assessment'),
+    ...distributions
+      .map((distribution) => distribution.reduce((sum, share) => sum + share, 0))
+      .filter((sum) => !(Math.abs(sum - 1) <= 1e-12))
+      .map((sum) => `a distribution sums to ${String(sum)}`),
+    ...shares
+      .filter((share) => !(share >= 0 && share <= 1 + 1e-12))
+      .map((share) => `a share is ${String(share)}`),
+    ...amounts.filter((amount) => !(amount >= 0)).map((amount) => `an amount is ${String(amount)}`),
+    ...range.filter(({ low, high }) => !(low <= high)).map(() => 'a range is upside down'),
+  ];
 }
 
-function expectSumsToOne(shares: readonly number[], what: string): void {
-  expect(Math.abs(shares.reduce((sum, share) => sum + share, 0) - 1), what).toBeLessThanOrEqual(1e-12);
+function standingsOf({ standing, linearPool, own, without, nextTests }: Assessment): number[][] {
+  return [
+    standing,
+    linearPool,
+    ...Object.values(own),
+    ...Object.values(without.findings),
+    ...Object.values(without.contributors).filter((one) => one !== null),
+    ...nextTests.flatMap(({ levels }) => levels.map((level) => level.standing)),
+  ];
 }
 
-function expectFinite(value: unknown, path: string): void {
-  if (typeof value === 'number') expect(Number.isFinite(value), `${path} is ${value}`).toBe(true);
-  else if (typeof value === 'object' && value !== null) {
-    for (const [key, entry] of Object.entries(value)) expectFinite(entry, `${path}.${key}`);
-  }
+function notFinite(value: unknown, path: string): string[] {
+  if (typeof value === 'number') return Number.isFinite(value) ? [] : [`${path} is ${String(value)}`];
+  if (typeof value !== 'object' || value === null) return [];
+  return Object.entries(value).flatMap(([key, entry]) => notFinite(entry, `${path}.${key}`));
 }

@@ -1,4 +1,4 @@
-import { inferAll } from 'bayesjs';
+import bayesjs from 'bayesjs';
 import { assess } from '../../assess.js';
 import { sixteenConditions, sixteenConditionsFolded } from '../sixteen-conditions.js';
 import type { Measured } from './panels.js';
@@ -15,7 +15,7 @@ export function measureNetwork(): Compared {
   const panel = sixteenConditions();
   const { network, evidence } = sixteenConditionsFolded();
   const ours = timed(() => assess(panel, { only: 'standing' }));
-  const theirs = timed(() => inferAll(network, evidence, { precision: 15, force: true }));
+  const theirs = timed(() => bayesjs.inferAll(network, evidence, { precision: 15, force: true }));
   return {
     panel: 'noisyor-net20_40, first 16 conditions, 21 findings',
     what: 'standing alone, c > 0',
