@@ -54,7 +54,9 @@ export function connect(running: RunningApp, headers: Record<string, string>): L
   });
   open.add(socket);
   const heard: Heard[] = [];
-  socket.onAny((event: string, payload: Record<string, unknown>) => heard.push({ event, payload }));
+  socket.onAny((event: string, payload: Record<string, unknown>) => {
+    heard.push({ event, payload });
+  });
   const of = (event: string) => heard.filter((one) => one.event === event).map((one) => one.payload);
   return {
     socket,
@@ -62,9 +64,11 @@ export function connect(running: RunningApp, headers: Record<string, string>): L
     of,
     watch: (caseId) => socket.timeout(15_000).emitWithAck(liveEvents.watch, { caseId }) as Promise<unknown>,
     until: async (event, fits = () => true) => {
-      for (const began = Date.now(); Date.now() - began < 15_000; await wait(5)) {
+      const began = Date.now();
+      while (Date.now() - began < 15_000) {
         const found = of(event).find(fits);
         if (found) return found;
+        await wait(5);
       }
       throw new Error(`${event} was not heard; heard were ${JSON.stringify(heard)}`);
     },

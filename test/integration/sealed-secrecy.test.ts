@@ -86,9 +86,7 @@ afterAll(async () => {
 function spellings(outOf100: number): RegExp {
   const decimal = String(outOf100).replace('.', '\\.');
   const fraction = String(Math.round(outOf100 * 10)).padStart(3, '0');
-  return new RegExp(
-    `(?<![\\w.:-])(?:${decimal}|0\\.${fraction}\\d*|${String(Number(fraction))})(?![\\w.-])`,
-  );
+  return new RegExp(`(?<![\\w.:-])(?:${decimal}|0\\.${fraction}\\d*|${String(Number(fraction))})(?![\\w.-])`);
 }
 const secrets = [...secretNumbers.map(spellings), new RegExp(secretWords), new RegExp(typedNumber)];
 
