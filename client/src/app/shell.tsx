@@ -1,5 +1,5 @@
 import './shell.css';
-import { useSyncExternalStore } from 'react';
+import { useState, useSyncExternalStore } from 'react';
 import { Navigate, NavLink, Outlet, ScrollRestoration, useLocation } from 'react-router-dom';
 import { Failure } from '../components/failure';
 import { SkeletonPage } from '../components/skeleton';
@@ -17,6 +17,8 @@ export function Shell() {
   const me = useMe();
   const over = useSessionOver();
   const { pathname, search } = useLocation();
+  const [seen, setSeen] = useState(false);
+  if (me.data && !seen) setSeen(true);
   if (me.isPending) return <SkeletonPage />;
   if (me.data === undefined)
     return (
@@ -25,7 +27,9 @@ export function Shell() {
       </div>
     );
   if (me.data === null) {
-    const to = pathname === '/' && search === '' ? '' : `?to=${encodeURIComponent(pathname + search)}`;
+    // Whoever signed out does not want the next person to land on their page.
+    const to =
+      seen || (pathname === '/' && search === '') ? '' : `?to=${encodeURIComponent(pathname + search)}`;
     return <Navigate to={`/sign-in${to}`} replace />;
   }
   return (

@@ -2,19 +2,25 @@ import { queryOptions, useQuery } from '@tanstack/react-query';
 import { type Me, meSchema } from '@weighhouse/shared/contracts/people';
 import { isApiError, request } from '../../../lib/api';
 
-/** Who is signed in; null for nobody. */
-async function getMe(signal: AbortSignal): Promise<Me | null> {
+/**
+ * Who is signed in; null for nobody.
+ * @param known somebody is on this page already: then a session that is over is waited out as for every other request,
+ *   because leaving the page would lose what stands on it
+ */
+async function getMe(signal: AbortSignal, known: boolean): Promise<Me | null> {
   try {
-    return await request('GET', '/api/session', { schema: meSchema, signal, wait: false });
+    return await request('GET', '/api/session', { schema: meSchema, signal, wait: known });
   } catch (error) {
-    if (isApiError(error) && error.status === 401) return null;
+    if (isApiError(error) && error.status === 401 && !known) return null;
     throw error;
   }
 }
 
+const key = ['me'] as const;
+
 export const meQuery = queryOptions({
-  queryKey: ['me'],
-  queryFn: ({ signal }) => getMe(signal),
+  queryKey: key,
+  queryFn: ({ client, signal }) => getMe(signal, client.getQueryData<Me | null>(key) != null),
   staleTime: 60_000,
 });
 

@@ -9,6 +9,8 @@ import { isApiError } from '../../../lib/api';
 import { useAddCentre, useCentres } from '../api/centres';
 
 const empty = { code: '', name: '' };
+/** A person’s form on the same page has a name as well, and every control needs an id of its own. */
+const own = (path: string) => `centre.${path}`;
 
 /** The hospitals and practices that people work at, and a new one. */
 export function CentreList() {
@@ -31,7 +33,11 @@ export function CentreList() {
   };
 
   const field = (path: 'code' | 'name', label: string) => (
-    <FormField label={label} path={path} faults={faults}>
+    <FormField
+      label={label}
+      path={own(path)}
+      faults={faults.map((fault) => ({ ...fault, path: own(fault.path) }))}
+    >
       {(control) => (
         <TextField.Root
           {...control}

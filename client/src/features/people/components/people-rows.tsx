@@ -15,7 +15,9 @@ interface Props {
 
 /** The people, with what an administrator may do with each. */
 export function PeopleRows({ people, onChange, onSaid }: Props) {
-  const [leaving, setLeaving] = useState<Person | null>(null);
+  const [leavingId, setLeavingId] = useState<string | null>(null);
+  // As the list has it now, so that a second try goes upon the newest version.
+  const leaving = people.find((person) => person.id === leavingId);
   const { change } = useChangePeople();
   return (
     <>
@@ -28,16 +30,16 @@ export function PeopleRows({ people, onChange, onSaid }: Props) {
               onChange(person);
             }}
             onDeactivate={() => {
-              setLeaving(person);
+              setLeavingId(person.id);
             }}
             onSaid={onSaid}
           />
         ))}
       </ul>
       <ConfirmDialog
-        open={leaving !== null}
+        open={leaving !== undefined}
         onOpenChange={(open) => {
-          if (!open) setLeaving(null);
+          if (!open) setLeavingId(null);
         }}
         title={`Deactivate ${leaving?.name ?? ''}?`}
         verb="Deactivate"

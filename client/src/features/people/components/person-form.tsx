@@ -1,7 +1,13 @@
 import { Button, Dialog, TextField } from '@radix-ui/themes';
 import type { FieldFault } from '@weighhouse/shared/contracts/errors';
-import { type InvitePerson, invitePersonSchema, type Person } from '@weighhouse/shared/contracts/people';
+import {
+  type InvitePerson,
+  invitePersonSchema,
+  type Person,
+  personSchema,
+} from '@weighhouse/shared/contracts/people';
 import { type SubmitEvent, useState } from 'react';
+import { BothTexts } from '../../../components/both-texts';
 import { ErrorSummary } from '../../../components/error-summary';
 import { FailureLine } from '../../../components/failure';
 import { faultsIn } from '../../../components/faults';
@@ -10,6 +16,7 @@ import { SelectBox } from '../../../components/select-box';
 import { isApiError } from '../../../lib/api';
 import { useCentres } from '../api/centres';
 import { useChangePeople } from '../api/change-people';
+import { PersonLines } from './person-lines';
 import { RoleChoices } from './role-choices';
 
 const labels = { email: 'E-mail', name: 'Name', specialty: 'Specialty', centreId: 'Centre', roles: 'Roles' };
@@ -27,7 +34,9 @@ export function PersonForm({ person, onDone }: { person: Person | null; onDone: 
   const [faults, setFaults] = useState<FieldFault[]>([]);
   const [error, setError] = useState<unknown>(null);
   const centres = useCentres();
+  const [version, setVersion] = useState(person?.version ?? 0);
   const { invite, change } = useChangePeople();
+  const theirs = isApiError(error, 'stale') ? personSchema.safeParse(error.current).data : undefined;
 
   const submit = async (event: SubmitEvent) => {
     event.preventDefault();
@@ -35,12 +44,14 @@ export function PersonForm({ person, onDone }: { person: Person | null; onDone: 
       ...typed,
       email: person ? 'known@known.example' : typed.email,
     });
-    setFaults(found);
+    setFaults(
+      found.map((fault) => (fault.path === 'centreId' ? { ...fault, message: 'must be chosen' } : fault)),
+    );
     setError(null);
     if (found.length > 0) return;
     const { email, ...rest } = typed;
     try {
-      if (person) await change.mutateAsync({ id: person.id, version: person.version, ...rest });
+      if (person) await change.mutateAsync({ id: person.id, version, ...rest });
       else await invite.mutateAsync({ email, ...rest });
       onDone(person ? `${rest.name} is changed.` : `The invitation to ${email} is on its way.`);
     } catch (failed) {
@@ -67,6 +78,22 @@ export function PersonForm({ person, onDone }: { person: Person | null; onDone: 
   return (
     <form onSubmit={(event) => void submit(event)} noValidate>
       <ErrorSummary faults={faults} labels={labels} title="Please mend this first" />
+      {theirs && (
+        <BothTexts
+          what="this person"
+          mine={<PersonLines {...typed} centres={centres.data?.items ?? []} />}
+          theirs={<PersonLines {...begin(theirs)} centres={centres.data?.items ?? []} />}
+          onKeepMine={() => {
+            setVersion(theirs.version);
+            setError(null);
+          }}
+          onTakeTheirs={() => {
+            setTyped(begin(theirs));
+            setVersion(theirs.version);
+            setError(null);
+          }}
+        />
+      )}
       {!person && line('email', 'The invitation goes there, with a link that works once.')}
       {line('name', 'As colleagues write it, with the title.')}
       {line('specialty')}
@@ -95,7 +122,7 @@ export function PersonForm({ person, onDone }: { person: Person | null; onDone: 
           setTyped({ ...typed, roles });
         }}
       />
-      {faults.length === 0 && <FailureLine error={error} />}
+      {faults.length === 0 && !theirs && <FailureLine error={error} />}
       <div className="actions">
         <Button type="submit" loading={invite.isPending || change.isPending}>
           {person ? 'Save changes' : 'Send invitation'}
