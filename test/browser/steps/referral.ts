@@ -7,6 +7,7 @@ export const question = 'Eleven weeks of evening fever and sore wrists: what is 
 export async function refer(page: Page, report: Buffer): Promise<string> {
   await page.getByRole('link', { name: 'Cases', exact: true }).click();
   await page.getByRole('link', { name: 'New referral' }).first().click();
+  await page.getByRole('heading', { level: 1, name: 'A new referral' }).waitFor();
   await page.getByLabel('Question').fill(question);
   await page.getByRole('button', { name: 'Begin the referral' }).click();
   await page.waitForURL(/\/cases\/[0-9a-f-]{36}\/edit/);
@@ -42,10 +43,10 @@ async function fillIdentityCard(page: Page): Promise<void> {
   if (await open.isVisible()) await open.click();
   const card = page.getByRole('group', { name: 'Identity card' });
   await card.getByLabel('Name').fill('Ottoline Brandvold');
-  await card.getByLabel('Date of birth').fill('1979-05-04');
+  await card.getByLabel('Birth date').fill('1979-05-04');
   await card.getByLabel('Telephone').fill('+353 20 915 0199');
   await card.getByLabel('Language').fill('English');
-  await card.getByRole('button', { name: /save/i }).click();
+  await card.getByRole('button', { name: 'Save the card' }).click();
   await page.getByText('Ottoline Brandvold').first().waitFor();
 }
 
@@ -62,7 +63,7 @@ export async function accept(
     await page.getByRole('button', { name: `Add ${name}` }).click();
   }
   await page.getByRole('radio', { name: 'No date yet' }).click();
-  await page.getByLabel('Quorum').fill('2');
+  await page.getByRole('textbox', { name: 'Quorum' }).fill('2');
   await page.getByRole('button', { name: 'Accept the case' }).click();
   await page.waitForURL(/\/differential$/);
 }
