@@ -42,7 +42,10 @@ export async function startApp(environment: Record<string, string> = {}): Promis
     PUBLIC_URL: 'http://localhost:4180',
     ...environment,
   });
-  const app = await NestFactory.create<NestExpressApplication>(AppModule, { logger: ['error'], abortOnError: false });
+  const app = await NestFactory.create<NestExpressApplication>(AppModule, {
+    logger: ['error'],
+    abortOnError: false,
+  });
   configureApplication(app);
   await app.listen(0, '127.0.0.1');
   const { port } = app.getHttpServer().address() as AddressInfo;
