@@ -1,5 +1,4 @@
-import type { Plan, PlanInput, PlanView } from '@weighhouse/shared/contracts/plans';
-import { planViewSchema } from '@weighhouse/shared/contracts/plans';
+import { type Plan, type PlanInput, type PlanView, planViewSchema } from '@weighhouse/shared/contracts/plans';
 import type { RunningApp } from '../setup/app.js';
 import { type CaseWishes, type JudgedCase, unsealedCase } from './judgements.js';
 import { testPassword } from './people.js';
