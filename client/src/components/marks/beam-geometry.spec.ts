@@ -2,8 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { barPlace, beamPlace, beamShape } from './beam-geometry';
 
 describe('the place of a weight of evidence', () => {
-  it('is the centre line at zero and the ends at 15 decibans', () => {
-    expect([0, 15, -15, 7.5, -3].map(beamPlace)).toEqual([50, 100, 0, 75, 40]);
+  it('is the centre line at zero and the ends at 6 decibans', () => {
+    expect([0, 6, -6, 3, -1.2].map(beamPlace)).toEqual([50, 100, 0, 75, 40]);
   });
 
   it('is held at the ends beyond the reach', () => {
@@ -20,9 +20,9 @@ describe('a beam', () => {
     expect(beamShape(-6)).toEqual({ start: 30, width: 20, side: 'against', beyond: false });
   });
 
-  it('has an arrow only beyond 15 decibans', () => {
-    expect(beamShape(15).beyond).toBe(false);
-    expect(beamShape(15.1)).toEqual({ start: 50, width: 50, side: 'for', beyond: true });
+  it('has an arrow only beyond 6 decibans', () => {
+    expect(beamShape(6).beyond).toBe(false);
+    expect(beamShape(6.1)).toEqual({ start: 50, width: 50, side: 'for', beyond: true });
     expect(beamShape(-22)).toEqual({ start: 0, width: 50, side: 'against', beyond: true });
   });
 

@@ -1,5 +1,8 @@
-/** A beam reaches this many decibans to each side of its centre line; what goes beyond gets an arrow. */
-export const beamReach = 15;
+/**
+ * A beam reaches this many decibans (about 4 times as often) to each side of its centre line; what goes beyond gets an
+ * arrow. Tempered and pooled rows carry one to four, which a longer reach would draw as a few pixels.
+ */
+export const beamReach = 6;
 
 /** A beam in percent of its lane's width, which side it lies on and whether it goes beyond the lane. */
 export interface BeamShape {
