@@ -2,7 +2,9 @@ import type { Exponents } from '../evidence/exponents.js';
 import type { CheckedPanel } from '../validation/checked-panel.js';
 import type { View } from '../view.js';
 import { FixedPower } from './fixed-power.js';
+import type { RowProduct } from './row-product.js';
 import { type RowSpace, type RowTable, rowSpace, rowTable } from './row-table.js';
+import { addRowLogs } from './set-posterior.js';
 import type { SetTable } from './set-table.js';
 
 /** A posterior over sets that questions are asked about. */
@@ -13,8 +15,8 @@ export interface Posterior {
   exponents: Exponents;
   /** Posterior of each set. */
   shares: Float64Array;
-  /** For each group Σ ln P' over its observed rows, without the exponent. */
-  groupLogs: ReadonlyMap<number, Float64Array>;
+  /** Working space. */
+  product: RowProduct;
 }
 
 /** An answer over some of the sets, and the largest part of it that those left aside could account for. */
@@ -27,6 +29,7 @@ export interface Bounded<Value> {
 export class Asked {
   private readonly room: RowSpace;
   private readonly powers = new Map<number, FixedPower>();
+  private readonly groups = new Map<number, Float64Array>();
 
   constructor(readonly posterior: Posterior) {
     this.room = rowSpace(posterior.table);
@@ -45,5 +48,20 @@ export class Asked {
     const power = new FixedPower(exponent);
     this.powers.set(exponent, power);
     return power;
+  }
+
+  /** For each set Σ ln P' over the observed and judged rows of a group, without the exponent. */
+  groupLogs(group: number): Float64Array {
+    const known = this.groups.get(group);
+    if (known) return known;
+    const { panel, table, view, product } = this.posterior;
+    const rows = [...panel.findings.keys()].filter((r) => {
+      const finding = panel.findings[r]!;
+      return finding.group === group && finding.observed !== null && view.judged[r];
+    });
+    const logs = new Float64Array(table.size);
+    addRowLogs(panel, view, rows, 1, logs, product);
+    this.groups.set(group, logs);
+    return logs;
   }
 }

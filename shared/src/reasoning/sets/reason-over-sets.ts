@@ -6,7 +6,7 @@ import { explains } from './explains.js';
 import { marginals } from './marginals.js';
 import { mostProbableSets } from './most-probable-sets.js';
 import { RowProduct } from './row-product.js';
-import { classesByExponent, classesByGroup } from './row-classes.js';
+import { rowClasses } from './row-classes.js';
 import { addRowLogs, normaliseLogs, priorLogs } from './set-posterior.js';
 import { type SetAssumption, setPrior, shareLeftOut } from './set-prior.js';
 import { questions } from './set-questions.js';
@@ -23,26 +23,26 @@ export function reasonOverSets(
 ): Reasoning {
   const { table } = assumption;
   const prior = setPrior(assumption, view.prior);
-  const before = priorLogs(assumption, prior, new Float64Array(table.size));
-  /** Working space, reused by every computation over all sets. */
   const product = new RowProduct(table);
-  const scratch = new Float64Array(table.size);
-  /** For each group Σ ln P' over its rows, without the exponent; the rows without a group are at -1. */
-  const groupLogs = new Map<number, Float64Array>();
+  /** For each set Σ γ ln P'(observed | set). */
   const evidence = new Float64Array(table.size);
-  for (const [group, { exponent, rows }] of classesByGroup(panel, view, exponents.rows)) {
-    const logs = new Float64Array(table.size);
-    addRowLogs(panel, view, rows, 1, logs, product);
-    for (let p = 0; p < logs.length; p += 1) evidence[p]! += exponent * logs[p]!;
-    if (group >= 0) groupLogs.set(group, logs);
-  }
+  addEvidence(panel, view, exponents, evidence, product);
+
+  /** Writes the posterior were every exponent `factor` times what it is. */
   const posterior = (factor: number, logs: Float64Array) => {
-    for (let p = 0; p < logs.length; p += 1) logs[p] = before[p]! + factor * evidence[p]!;
+    priorLogs(assumption, prior, logs);
+    for (let p = 0; p < logs.length; p += 1) logs[p]! += factor * evidence[p]!;
     return normaliseLogs(logs);
   };
   const standingIn = (shares: Float64Array) => marginals(table, table, shares, shares[0]!);
   const shares = posterior(1, new Float64Array(table.size));
   const standing = standingIn(shares);
+
+  // Not needed for the standing alone, so made when first asked for.
+  let scratch: Float64Array | null = null;
+  const space = () => (scratch ??= new Float64Array(table.size));
+  let asked: ReturnType<typeof questions> | null = null;
+  const ask = () => (asked ??= questions({ panel, table, view, exponents, shares, product }));
 
   return {
     exact: table.largest === table.candidates,
@@ -50,14 +50,27 @@ export function reasonOverSets(
     standing,
     sets: () => mostProbableSets(table, shares),
     explains: () => explains(table, shares, standing),
-    tempered: (factor) => standingIn(posterior(factor, scratch)),
+    tempered: (factor) => standingIn(posterior(factor, space())),
     standingOf(other, otherExponents) {
-      const logs = priorLogs(assumption, setPrior(assumption, other.prior), scratch);
-      for (const { exponent, rows } of classesByExponent(panel, other, otherExponents.rows)) {
-        addRowLogs(panel, other, rows, exponent, logs, product);
-      }
+      const logs = priorLogs(assumption, setPrior(assumption, other.prior), space());
+      addEvidence(panel, other, otherExponents, logs, product);
       return standingIn(normaliseLogs(logs));
     },
-    ...questions({ panel, table, view, exponents, shares, groupLogs }),
+    withoutFinding: (finding) => ask().withoutFinding(finding),
+    swapped: (finding, views, column) => ask().swapped(finding, views, column),
+    expectation: (finding) => ask().expectation(finding),
   };
+}
+
+/** Adds γ ln P'(observed | set) of every row that counts, rows of equal exponent together. */
+function addEvidence(
+  panel: CheckedPanel,
+  view: View,
+  exponents: Exponents,
+  logs: Float64Array,
+  product: RowProduct,
+): void {
+  for (const { exponent, rows } of rowClasses(panel, view, exponents.rows)) {
+    addRowLogs(panel, view, rows, exponent, logs, product);
+  }
 }

@@ -8,11 +8,11 @@ import type { Support } from './significant.js';
  * and the others of its group count for a little more, since n_g is one less.
  */
 export function withoutFinding(asked: Asked, support: Support, finding: number): Bounded<Float64Array> {
-  const { panel, table, view, exponents, groupLogs } = asked.posterior;
+  const { panel, table, view, exponents } = asked.posterior;
   const { shares, positions, work } = support;
   const exponent = exponents.withoutOne[finding]!;
   const more = exponent - exponents.rows[finding]!;
-  const group = more > 0 ? groupLogs.get(panel.findings[finding]!.group) : undefined;
+  const group = more > 0 ? asked.groupLogs(panel.findings[finding]!.group) : null;
   const row = asked.row(view, finding);
   writeRow(work, support, row);
   asked.power(exponent).raise(work);
