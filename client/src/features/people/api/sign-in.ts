@@ -15,8 +15,7 @@ export function useSignIn() {
     onSuccess: (me) => {
       const before = client.getQueryData(meQuery.queryKey);
       const same = before?.id === me.id;
-      // The query of who is signed in stays: the page that waits for its answer looks at it.
-      if (!same) client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== meQuery.queryKey[0] });
+      if (!same) leaveNothing(client);
       client.setQueryData(meQuery.queryKey, me);
       decideSession(same);
     },
