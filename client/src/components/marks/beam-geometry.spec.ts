@@ -13,11 +13,11 @@ describe('the place of a weight of evidence', () => {
 
 describe('a beam', () => {
   it('goes right where it counts for a candidate', () => {
-    expect(beamShape(6)).toEqual({ start: 50, width: 20, side: 'for', beyond: false });
+    expect(beamShape(2.4)).toEqual({ start: 50, width: 20, side: 'for', beyond: false });
   });
 
   it('goes left where it counts against', () => {
-    expect(beamShape(-6)).toEqual({ start: 30, width: 20, side: 'against', beyond: false });
+    expect(beamShape(-2.4)).toEqual({ start: 30, width: 20, side: 'against', beyond: false });
   });
 
   it('has an arrow only beyond 6 decibans', () => {

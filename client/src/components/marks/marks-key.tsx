@@ -44,7 +44,10 @@ export function MarksKey({ own, sealed, before }: { own: boolean; sealed: boolea
           sealed
         </li>
       ) : (
-        <li>Beam right of centre: counts for. Left: counts against. Arrow: beyond 6 decibans, about 4 times as often.</li>
+        <li>
+          Beam right of centre: counts for. Left: counts against. Arrow: beyond 6 decibans, about 4 times as
+          often.
+        </li>
       )}
     </ul>
   );
