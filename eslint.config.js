@@ -5,7 +5,7 @@ import importX from 'eslint-plugin-import-x';
 import reactHooks from 'eslint-plugin-react-hooks';
 import globals from 'globals';
 import typescript from 'typescript-eslint';
-import { plugin as weighhouse } from './lint/plugin.mjs';
+import { plugin as weighhouse } from './test/lint/plugin.mjs';
 
 const typed = ['**/*.{ts,tsx}'];
 const tests = ['**/*.{spec,test}.{ts,tsx}', 'test/**/*.ts', '**/testing/**/*.ts'];

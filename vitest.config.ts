@@ -28,7 +28,7 @@ export default defineConfig({
             'db/launch/**/*.spec.ts',
             'storage-fake/src/**/*.spec.ts',
             'test/run/**/*.spec.ts',
-            'lint/**/*.spec.ts',
+            'test/lint/**/*.spec.ts',
           ],
           setupFiles: ['test/setup/reflection.ts'],
         },

@@ -3,7 +3,7 @@ import { fileURLToPath } from 'node:url';
 import { importFault } from './import-direction.mjs';
 import { importTarget } from './import-target.mjs';
 
-const root = fileURLToPath(new URL('..', import.meta.url));
+const root = fileURLToPath(new URL('../..', import.meta.url));
 
 /** @type {import('eslint').Rule.RuleModule} */
 const importDirection = {

@@ -8,7 +8,7 @@ import typescript from 'typescript-eslint';
 import { afterAll, describe, expect, it } from 'vitest';
 import { plugin } from './plugin.mjs';
 
-const root = fileURLToPath(new URL('..', import.meta.url));
+const root = fileURLToPath(new URL('../..', import.meta.url));
 const eslint = new ESLint({ cwd: root });
 
 interface Configuration {

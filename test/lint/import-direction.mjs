@@ -67,7 +67,7 @@ function serverFault(from, to) {
     return `The rows of ${target} belong to ${target}: call one of its services instead.`;
   if (readers.includes(owner)) return null;
   if (!domains.includes(owner))
-    return `${owner} has no place in the order of domains yet: give it one in lint/.`;
+    return `${owner} has no place in the order of domains yet: give it one in test/lint/.`;
   if (domains.indexOf(owner) > domains.indexOf(target) && domains.includes(target)) return null;
   return `${owner} must not import ${target}. The order is ${domains.join(', ')}: a later one may import an earlier one.`;
 }
