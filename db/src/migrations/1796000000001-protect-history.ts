@@ -11,6 +11,8 @@ const growing = [
   'standing_share',
   'settings_change',
   'plan_stance',
+  'contact',
+  'outcome',
 ];
 
 const refuse = (words: string): string => `SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = '${words}'`;

@@ -22,7 +22,6 @@ const schema = z
     S3_SECRET_KEY: z.preprocess(unset, z.string({ error: 'must be set' })),
     SMTP_URL: z.preprocess(unset, z.url({ error: 'must be set, for instance smtp://host:25' })),
     MAIL_FROM: z.preprocess(unset, z.string().default('Weighhouse <no-reply@weighhouse.invalid>')),
-    REDIS_URL: optional(z.url()),
     TRUST_PROXY: optional(z.string()),
     TIME_ZONE: z.preprocess(
       unset,
