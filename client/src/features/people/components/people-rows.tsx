@@ -16,9 +16,8 @@ interface Props {
 /** The people, with what an administrator may do with each. */
 export function PeopleRows({ people, onChange, onSaid }: Props) {
   const [leavingId, setLeavingId] = useState<string | null>(null);
-  // As the list has it now, so that a second try goes upon the newest version.
   const leaving = people.find((person) => person.id === leavingId);
-  const { change } = useChangePeople();
+  const { setActive } = useChangePeople();
   return (
     <>
       <ul className="people-list">
@@ -46,7 +45,7 @@ export function PeopleRows({ people, onChange, onSaid }: Props) {
         danger
         onConfirm={async () => {
           if (!leaving) return;
-          await change.mutateAsync({ id: leaving.id, version: leaving.version, active: false });
+          await setActive.mutateAsync({ person: leaving, active: false });
           onSaid(`${leaving.name} is deactivated and signed out.`);
         }}
       >
@@ -70,7 +69,7 @@ function Row({
 }) {
   const format = useFormat();
   const me = useSignedIn();
-  const { change, inviteAgain } = useChangePeople();
+  const { setActive, inviteAgain } = useChangePeople();
   const active = person.active !== false;
   const button = (label: string, onClick: () => void, busy = false) => (
     <Button
@@ -127,8 +126,8 @@ function Row({
         {active
           ? person.id !== me.id && button('Deactivate', onDeactivate)
           : button('Activate', () => {
-              change.mutate(
-                { id: person.id, version: person.version, active: true },
+              setActive.mutate(
+                { person, active: true },
                 {
                   onSuccess: () => {
                     onSaid(`${person.name} can sign in again.`);
