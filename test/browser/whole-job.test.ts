@@ -63,7 +63,8 @@ describe('five people close a case together', () => {
     const folder = process.env['SCREENSHOTS'];
     if (folder === undefined) return;
     const chapter = task.name.replace(/[^a-z]+/gi, '-').slice(0, 40);
-    for (const who of everybody) await page(who).screenshot({ path: path.join(folder, `${chapter}-${who}.png`) });
+    for (const who of everybody)
+      await page(who).screenshot({ path: path.join(folder, `${chapter}-${who}.png`) });
   });
 
   it('all sign in', async () => {
