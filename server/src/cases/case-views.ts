@@ -40,7 +40,7 @@ export class CaseViews {
       ...columnsOf(file),
       referrer: ref(file.referrerId),
       chair: chair ? ref(chair.personId) : null,
-      team: team.map((entry) => memberView(entry, ref)),
+      team: team.map((entry) => memberView(mayKnowWeights(parts) ? entry : unweighted(entry), ref)),
       round: roundProgress(file, team),
       counts: await this.facts.countsOf(file.id),
       words: wordsOf(file, (id) => ref(id).name),
@@ -62,6 +62,10 @@ export class CaseViews {
     );
   }
 }
+
+/** A weight with a name would tell the referrer whose the unnamed numbers of the panel are. */
+const mayKnowWeights = (parts: readonly Part[]): boolean => parts.some((part) => part !== 'referrer');
+const unweighted = (entry: TeamEntry): TeamEntry => ({ ...entry, weight: null, reason: null });
 
 function memberView(entry: TeamEntry, ref: (id: string) => PersonRef): TeamMemberView {
   return {
