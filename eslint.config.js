@@ -34,6 +34,8 @@ export default typescript.config(
     },
   },
   { files: ['**/*.{js,mjs}'], languageOptions: { globals: globals.node } },
+  // The measuring scripts hand functions to the browser.
+  { files: ['test/load/**/*.mjs'], languageOptions: { globals: globals.browser } },
   {
     files: typed,
     extends: [typescript.configs.strictTypeChecked],

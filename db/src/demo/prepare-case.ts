@@ -19,7 +19,7 @@ export interface PreparedCase {
   caseId: string;
   candidateSet: number;
   /** @param key of a finding or a test in the story */
-  findingId(key: string): string;
+  findingId: (key: string) => string;
 }
 
 /** The referrer's part: draft, identity card, reports, submitted. */
