@@ -6,13 +6,13 @@ export interface Received {
   clear(): void;
 }
 
-const carriesText = /json|text|javascript|html/;
+const carriesText = /json|text/;
 
 /** Begins to note what reaches this page. */
 export function eavesdrop(page: Page): Received {
   let pending: Promise<string>[] = [];
   page.on('response', (response) => {
-    const isData = response.url().includes('/api/') || response.url().includes('/live');
+    const isData = /^\/(api|live)\//.test(new URL(response.url()).pathname);
     if (!isData || !carriesText.test(response.headers()['content-type'] ?? '')) return;
     pending.push(response.text().catch(() => ''));
   });
@@ -33,5 +33,7 @@ export function eavesdrop(page: Page): Received {
 export function formsOf(outOf100: string): RegExp {
   const tenths = String(Math.round(Number(outOf100) * 10));
   const share = `0?\\.${tenths.padStart(3, '0')}`;
-  return new RegExp(`(?<![\\d.])(${outOf100.replace('.', '\\.')}|${share}|${tenths})(?![\\d])`);
+  const number = `${outOf100.replace('.', '\\.')}|${share}|${tenths}`;
+  // Not a part of an identifier, a digest or a time.
+  return new RegExp(`(?<![\\w.-])(${number})(?![\\w-])`);
 }
