@@ -51,6 +51,8 @@ const rules = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-pra
  * @source Web Content Accessibility Guidelines 2.2, levels A and AA, by the rules of axe-core
  */
 export async function expectAccessible(page: Page): Promise<void> {
+  // A page that is still loading has no heading yet, and nothing to judge.
+  await page.getByRole('heading', { level: 1 }).first().waitFor();
   const { violations } = await new AxeBuilder({ page }).withTags(rules).analyze();
   const found = violations.map(({ id, nodes }) => `${id}: ${nodes.map((node) => node.html).join(' | ')}`);
   expect(found, page.url()).toEqual([]);

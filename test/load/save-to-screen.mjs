@@ -1,4 +1,3 @@
-/* global document, window, MutationObserver */
 // Measures how long a saved judgement takes to move the standing on somebody else's screen.
 // Usage: node test/load/save-to-screen.mjs http://localhost:4180 [saves]   (a running demo, loopback only)
 import { chromium } from 'playwright-core';
