@@ -167,6 +167,7 @@ describe('five people close a case together', () => {
   });
 
   it('the seals are verified in the browser', async () => {
+    await page('second').goto(`/cases/${caseId}/differential`);
     await page('second').getByRole('button', { name: /seal/i }).first().click();
     await page('second').getByRole('button', { name: 'Verify 2 seals now' }).click();
     await page('second').getByText('2 seals hold.').waitFor();
