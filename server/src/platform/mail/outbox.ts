@@ -42,9 +42,11 @@ export class Outbox {
 
   /** Sends what is due. Runs by itself; tests call it to wait for the letters. */
   @Interval(everyMs)
-  flush(): Promise<void> {
+  async flush(): Promise<void> {
+    // A run under way may have looked before the newest letter was there.
+    await this.sending;
     this.sending ??= this.sendDue().finally(() => (this.sending = null));
-    return this.sending;
+    await this.sending;
   }
 
   private async sendDue(): Promise<void> {
