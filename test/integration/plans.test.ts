@@ -21,6 +21,8 @@ beforeAll(async () => {
 });
 afterAll(() => running.close());
 beforeEach(() => {
+  // What was written before goes out first, so that only what follows is looked at.
+  await letters();
   box.clear();
 });
 afterEach(() => {
@@ -176,6 +178,8 @@ describe('agreement and dissent', () => {
     const half = await case_.chair.agent.post(`/api/cases/${case_.id}/plan/ask`).expect(409);
     expect([errorOf(half.body).id, pathsOf(half.body)]).toEqual(['not-ready', ['safetyNet']]);
     await savePlan(case_, { version: 1 });
+    // What was written before goes out first, so that only what follows is looked at.
+    await letters();
     box.clear();
     await case_.chair.agent.post(`/api/cases/${case_.id}/plan/ask`).expect(200);
     const sent = (await letters()).filter(({ subject }) => subject.includes(case_.number));
@@ -220,6 +224,8 @@ describe('agreement and dissent', () => {
     // Asked again, only those are written to who said nothing of the text as it stands.
     await two.agent.post(`${path}/agree`).expect(200);
     await letters();
+    // What was written before goes out first, so that only what follows is looked at.
+    await letters();
     box.clear();
     await case_.chair.agent.post(`${path}/plan/ask`).expect(200);
     expect((await letters()).flatMap(({ to }) => to).sort()).toEqual([one.email, three.email].sort());
@@ -250,6 +256,8 @@ describe('concluding', () => {
     expect(errorOf(wrong.body).id).toBe('wrong-password');
     await case_.contributors[1]!.agent.post(`${path}/dissent`).send({ words: 'I would wait.' }).expect(200);
     const differential = await case_.chair.agent.get(`${path}/differential`).expect(200);
+    await letters();
+    // What was written before goes out first, so that only what follows is looked at.
     await letters();
     box.clear();
     const view = await conclude(case_);
