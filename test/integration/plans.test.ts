@@ -21,8 +21,6 @@ beforeAll(async () => {
 });
 afterAll(() => running.close());
 beforeEach(() => {
-  // What was written before goes out first, so that only what follows is looked at.
-  await letters();
   box.clear();
 });
 afterEach(() => {
@@ -224,8 +222,6 @@ describe('agreement and dissent', () => {
     // Asked again, only those are written to who said nothing of the text as it stands.
     await two.agent.post(`${path}/agree`).expect(200);
     await letters();
-    // What was written before goes out first, so that only what follows is looked at.
-    await letters();
     box.clear();
     await case_.chair.agent.post(`${path}/plan/ask`).expect(200);
     expect((await letters()).flatMap(({ to }) => to).sort()).toEqual([one.email, three.email].sort());
@@ -256,8 +252,6 @@ describe('concluding', () => {
     expect(errorOf(wrong.body).id).toBe('wrong-password');
     await case_.contributors[1]!.agent.post(`${path}/dissent`).send({ words: 'I would wait.' }).expect(200);
     const differential = await case_.chair.agent.get(`${path}/differential`).expect(200);
-    await letters();
-    // What was written before goes out first, so that only what follows is looked at.
     await letters();
     box.clear();
     const view = await conclude(case_);
