@@ -83,15 +83,21 @@ export function makeOther(key: string, parts: Partial<Other> = {}): Other {
 export function makeAssessment(parts: Partial<AssessmentView> = {}): AssessmentView {
   return {
     method: 'weighhouse/1',
+    exact: true,
+    leftOut: 0,
     priorGiven: true,
     pooledPrior: [0.2, 0.8],
     pooledCells: {},
     unjudged: [],
     standing: [0.2, 0.8],
+    sets: [],
+    explains: [],
     own: {},
     linearPool: [0.2, 0.8],
     disagreementBits: 0,
     rows: {},
+    nextTests: [],
+    without: { contributors: {}, findings: {} },
     range: [
       { low: 0.1, high: 0.3 },
       { low: 0.7, high: 0.9 },
