@@ -1,21 +1,23 @@
-const vowel = 'aeiouyäöü';
+const longWords = /\p{L}{10,}/gu;
+/** Vowels, then consonants, then a vowel: where one syllable ends and the next begins. */
+const between = /(?<=[aeiouyäöü])([^aeiouyäöü]+)(?=[aeiouyäöü])/gi;
+/** Consonants that begin a syllable together: "hyper-tro-phic", not "hypert-rop-hic". */
+const together = /(?:[bcfgp]l|s?[ptk]r|[bcdfg]r|ch|ck|gh|ph|sh|th|wh|qu)$/i;
 
 /**
- * Lets long words break in narrow columns: a soft hyphen before each consonant that stands between vowels, which is
- * where syllables of medical words mostly begin ("Disse-mi-na-ted"). From memory, no dictionary; a wrong place only
+ * Lets long words break in narrow columns: a soft hyphen before the consonants that begin a syllable, which is where
+ * medical words mostly break ("Disse-mi-na-ted", "Hyper-ten-sive"). From memory, no dictionary; a wrong place only
  * looks odd.
  */
 export function withSoftHyphens(name: string): string {
-  return name.replace(/\p{L}{10,}/gu, hyphenated);
+  return name.replace(longWords, hyphenated);
 }
 
 function hyphenated(word: string): string {
-  const isVowel = (index: number) => vowel.includes((word[index] ?? '').toLowerCase());
-  let out = '';
-  for (let index = 0; index < word.length; index += 1) {
-    const syllable = isVowel(index - 1) && !isVowel(index) && isVowel(index + 1);
-    if (syllable && index >= 3 && word.length - index >= 3) out += '\u00ad';
-    out += word[index] ?? '';
-  }
-  return out;
+  return word.replace(between, (consonants: string, _all: string, start: number) => {
+    const onset = together.exec(consonants)?.[0].length ?? 1;
+    const at = start + consonants.length - onset;
+    if (at < 3 || word.length - at < 3) return consonants;
+    return `${consonants.slice(0, consonants.length - onset)}\u00ad${consonants.slice(consonants.length - onset)}`;
+  });
 }
