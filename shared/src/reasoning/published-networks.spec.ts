@@ -79,4 +79,22 @@ describe('the network of 20 conditions and 40 findings', () => {
       expectClose(test!.levels[1]!.p, p, 2e-5);
     }
   });
+
+  it('expects each result to settle as much of the single conditions as the exact algorithm does (own computation)', () => {
+    const expected = new Map([
+      [21, 0.6452406528656709],
+      [22, 0.003225736943291535],
+      [23, 0.07690484238561535],
+    ]);
+    for (const [position, bits] of expected) {
+      const { levels } = assessment.nextTests.find(({ finding }) => finding === `finding ${position}`)!;
+      const left = levels.reduce((sum, { p, standing }) => sum + p * uncertainty(standing), 0);
+      expectClose(uncertainty(assessment.standing) - left, bits, 1e-4);
+    }
+  });
 });
+
+/** The entropies of the single conditions, there or not, added up: in bits. */
+function uncertainty(standing: readonly number[]): number {
+  return standing.slice(0, -1).reduce((sum, p) => sum - p * Math.log2(p) - (1 - p) * Math.log2(1 - p), 0);
+}
