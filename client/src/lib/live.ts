@@ -35,6 +35,7 @@ function takeStanding(client: QueryClient, event: CaseStanding): void {
     return { ...known, assessment: { ...known.assessment, standing: event.standing } };
   });
   void client.invalidateQueries({ queryKey: key });
+  void client.invalidateQueries({ queryKey: ['case', event.caseId, 'panel'] });
 }
 
 /**

@@ -10,6 +10,7 @@ const touched = [
   'seals',
   'settings',
   'differential',
+  'panel',
   'trail',
   'plan',
 ];

@@ -41,11 +41,24 @@ export function CompactStanding() {
 }
 
 function Line({ column }: { column: Column }) {
-  const { differential } = useLedger();
+  const { differential, open } = useLedger();
   const view = standingView(differential, column.index);
   return (
     <li>
-      <span className="cell-list-name">{columnLabel(column)}</span>
+      {view.share === null ? (
+        <span className="cell-list-name">{columnLabel(column)}</span>
+      ) : (
+        <button
+          type="button"
+          className="text-button cell-list-name"
+          aria-label={`Why ${columnLabel(column)} stands there`}
+          onClick={() => {
+            open({ kind: 'why', target: 'standing', column: column.index });
+          }}
+        >
+          {columnLabel(column)}
+        </button>
+      )}
       {view.sealed ? (
         <span className="ledger-sealed" aria-hidden="true" />
       ) : (

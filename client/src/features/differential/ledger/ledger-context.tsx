@@ -14,6 +14,7 @@ export interface TypeAt {
 export type Panel =
   | { kind: 'row'; findingId: string; at: TypeAt | null }
   | { kind: 'prior'; at: TypeAt | null }
+  /** The target is a finding's id, `prior` or `standing`. */
   | { kind: 'why'; target: string; column: number }
   | { kind: 'finding'; findingId: string | null }
   | { kind: 'pooled' | 'round' | 'seals' | 'candidates' | 'groups' };

@@ -41,7 +41,12 @@ export function LedgerTable({ compact }: { compact: boolean }) {
       open(canJudge ? { kind: 'prior', at } : { kind: 'why', target: 'prior', column: place.column - 1 });
     const finding = rows[place.row - 1];
     if (finding) open({ kind: 'row', findingId: finding.id, at });
-    if (place.row === standingRow) open({ kind: 'pooled' });
+    if (place.row === standingRow)
+      open(
+        place.column > 0 && differential.assessment
+          ? { kind: 'why', target: 'standing', column: place.column - 1 }
+          : { kind: 'pooled' },
+      );
   };
   const columnAt = (place: Place): TypeAt | null => {
     const column = columns[place.column - 1];

@@ -2,14 +2,16 @@ import { naturalFrequency } from '@weighhouse/shared/reasoning/natural-frequency
 import { StandingPost } from '../../../components/marks/standing-post';
 import type { Column } from '../model/columns';
 import { standingLines, standingSentence, standingView } from '../model/standing-view';
+import { useLeaderRange } from '../why-sum/use-leader-range';
 import { useLedger } from './ledger-context';
 import { MovingFigure } from './moving-figure';
 
 /** The last row, always in view: where the panel stands. */
 export function StandingRow({ row }: { row: number }) {
-  const { columns, differential } = useLedger();
+  const { columns, differential, panel } = useLedger();
+  const range = useLeaderRange();
   return (
-    <tr className="ledger-standing">
+    <tr className="ledger-standing" aria-selected={panel?.kind === 'why' && panel.target === 'standing'}>
       <th scope="row" className="ledger-title" data-row={row} data-column={0} tabIndex={-1}>
         <span className="ledger-name">Where the panel stands</span>
         {standingLines(differential).map((line) => (
@@ -17,6 +19,7 @@ export function StandingRow({ row }: { row: number }) {
             {line}
           </span>
         ))}
+        {range !== null && <span className="ledger-line">{range}</span>}
       </th>
       {columns.map((column) => (
         <StandingCell key={column.id} column={column} row={row} />

@@ -5,6 +5,7 @@ import { cellView } from '../model/cells';
 import { columnLabel } from '../model/columns';
 import { stateWords } from '../model/finding-words';
 import { whyCell, type WhyLine, whyPrior } from '../model/why';
+import { StandingWhy } from '../why-sum/standing-why';
 import { SideHeading } from './side-panel';
 import { useWeights } from './use-weights';
 
@@ -15,6 +16,7 @@ export function WhyPanel({ target, column: index }: { target: string; column: nu
   const column = columns[index];
   const { assessment } = differential;
   if (!column || !assessment) return <p className="soft">There is no pooled number here.</p>;
+  if (target === 'standing') return <StandingWhy key={column.id} column={column} />;
   const finding = rows.find((row) => row.id === target);
   const pooled = (
     <button
