@@ -118,15 +118,16 @@ function Added({ assessment, panel, oneCause, column, against }: AddedProps) {
   const { sum } = state;
   return (
     <>
-      <p className="small soft">
-        {howWords(sum, oneCause)} In decibans: 3 make the odds about twice as long, 10 make them ten times as
-        long. A beam to the right counts for, to the left against.{' '}
-        <span className="sum-key-line" aria-hidden="true" />
-        the sum so far.
-      </p>
+      <p className="small soft">{howWords(sum, oneCause)}</p>
       <SumTable {...{ sum, assessment, column, against }} />
       <p className="small" data-adds-up={addsUp(sum, assessment.standing, column.index, against, oneCause)}>
         {totalWords(sum, assessment.standing, column.index, against, oneCause)}
+      </p>
+      <p className="small soft">
+        A beam to the right counts for, to the left against.{' '}
+        <span className="sum-key-line" aria-hidden="true" />
+        The black line is the sum so far. In decibans: 3 make the odds about twice as long, 10 ten times as
+        long. Reliability, overlap and tempering make a finding count less than it is seen.
       </p>
     </>
   );
@@ -134,10 +135,10 @@ function Added({ assessment, panel, oneCause, column, against }: AddedProps) {
 
 function howWords(sum: WhySum, oneCause: boolean): string {
   if (!sum.inThisOrder)
-    return 'Each finding pushes by how much more often it is seen in the one than in the other, after reliability, overlap and tempering; the order makes no difference.';
+    return 'Each finding pushes by how much more often it is seen in the one than in the other. The order makes no difference: the largest push stands first.';
   return oneCause
-    ? 'Against everything else a push depends on what is counted before it, so the pushes hold in this order: the findings that matter most first.'
-    : 'A patient may have several of these at once, so one column alone does not add up. Each push is how the odds change when this finding is counted after those above, in this order: the findings that matter most first.';
+    ? 'Against everything else a push depends on what is counted before it, so the pushes hold in this order: what matters most stands first.'
+    : 'A patient may have several of these at once, so one column alone does not add up. Each push is how the odds change when this finding is counted after those above, in this order: what matters most stands first.';
 }
 
 const endOf = (standing: readonly number[], column: number, against: Against, oneCause: boolean) =>

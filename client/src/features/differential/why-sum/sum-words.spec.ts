@@ -59,8 +59,8 @@ describe('the words of the sum', () => {
   it('gives a push its sign and its times', () => {
     expect([2.13, -0.4, 0.04, -0.01].map(signed)).toEqual(['+2.1', '−0.4', '0.0', '0.0']);
     expect([3.01, -6.02, 0, 0.1].map(countsWords)).toEqual([
-      'Counts for, 2 times',
-      'Counts against, 4 times',
+      'Counts for, as 2 times',
+      'Counts against, as 4 times',
       'Counts neither way',
       'Counts a little for',
     ]);

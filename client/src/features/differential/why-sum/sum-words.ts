@@ -38,12 +38,12 @@ export function signed(decibans: number): string {
 /** How a column is called inside a sentence. */
 export const columnWord = (column: Column): string => (column.none ? 'none of these' : column.letter);
 
-/** "Counts for", "Counts against" or "Counts neither way", with how many times as likely it makes the candidate. */
+/** "Counts for", "Counts against" or "Counts neither way", with how many times as often it counts as: less than it is seen, by tempering. */
 export function countsWords(decibans: number): string {
   if (Math.abs(decibans) < 0.05) return 'Counts neither way';
   const times = timesWords(factorOf(Math.abs(decibans)));
   const word = decibans > 0 ? 'for' : 'against';
-  return times === '1' ? `Counts a little ${word}` : `Counts ${word}, ${times} times`;
+  return times === '1' ? `Counts a little ${word}` : `Counts ${word}, as ${times} times`;
 }
 
 /**
