@@ -26,7 +26,7 @@ describe('drafts', () => {
       quorum: 3,
       round: null,
       parts: ['referrer'],
-      counts: { reports: 0, findings: 0, candidates: 0 },
+      counts: { reports: 0, findings: 0, pending: 0, candidates: 0 },
     });
     expect(empty.missing.map((part) => part.path)).toEqual([
       'question',

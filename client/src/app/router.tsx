@@ -24,6 +24,7 @@ const sections: RouteObject[] = [
   lazy('history', () => import('../features/cases/routes/history')),
   lazy('reports', () => import('../features/reports/routes/reports')),
   lazy('differential', () => import('../features/differential/routes/differential')),
+  lazy('next-test', () => import('../features/differential/routes/next-test')),
   lazy('plan', () => import('../features/plans/routes/plan'), [
     {
       index: true,

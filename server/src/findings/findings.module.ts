@@ -49,6 +49,7 @@ export class FindingsModule implements OnModuleInit {
   onModuleInit(): void {
     this.facts.register('candidates', (caseId) => this.candidates.count(caseId));
     this.facts.register('findings', (caseId) => this.findings.count(caseId));
+    this.facts.register('pending', (caseId) => this.findings.countPending(caseId));
     this.uses.register(reportIsInFindings);
   }
 }

@@ -51,6 +51,11 @@ export class FindingsService {
     return (await this.counting(caseId)).length;
   }
 
+  /** How many of them are not known yet. */
+  async countPending(caseId: string): Promise<number> {
+    return (await this.counting(caseId)).filter((finding) => finding.observed === null).length;
+  }
+
   private async entries(rows: FindingRow[], em: EntityManager): Promise<FindingEntry[]> {
     if (rows.length === 0) return [];
     const levels = await em.find(FindingLevel, {

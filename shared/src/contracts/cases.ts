@@ -123,7 +123,8 @@ export const caseSchema = z
     coexistence: z.number(),
     /** The open or last round in figures; who is in stands in GET …/rounds. */
     round: roundProgressSchema.nullable(),
-    counts: z.object({ reports: z.int(), findings: z.int(), candidates: z.int() }),
+    /** `pending`: the findings that are not known yet, among the findings. */
+    counts: z.object({ reports: z.int(), findings: z.int(), pending: z.int(), candidates: z.int() }),
     /** The last words with which the case was returned, declined, withdrawn or reopened. */
     words: z.object({ move: z.string(), text: z.string(), by: z.string(), at: momentSchema }).nullable(),
     /** What is still missing before the draft can be submitted. */

@@ -12,6 +12,7 @@ function tabsOf({ counts, abilities }: Case): Tab[] {
     { to: 'history', label: 'History', needs: 'case.read' },
     { to: 'reports', label: 'Reports', count: counts.reports, needs: 'report.read' },
     { to: 'differential', label: 'Differential', needs: 'differential.read' },
+    { to: 'next-test', label: 'Next test', count: counts.pending, needs: 'differential.read' },
     { to: 'plan', label: 'Plan', needs: 'plan.read' },
     { to: 'summary', label: 'Summary', needs: 'summary.read' },
     { to: 'trail', label: 'Trail', needs: 'trail.read' },

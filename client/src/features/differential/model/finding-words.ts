@@ -39,13 +39,22 @@ export function sourceWords(finding: Finding): string | null {
   return source.page === null ? source.fileName : `${source.fileName}, page ${String(source.page)}`;
 }
 
+const burdens = ['none', 'little', 'some', 'much'];
+
+/** 0 to 3 in words; between two steps both: "little to some". */
+export function burdenWords(burden: number | null): string {
+  if (burden === null) return 'not said';
+  const low = burdens[Math.floor(burden)] ?? 'much';
+  return Number.isInteger(burden) ? low : `${low} to ${burdens[Math.ceil(burden)] ?? 'much'}`;
+}
+
 /** What a pending finding would take: money, days, burden; empty where nothing was said. */
 export function effortWords(finding: Finding): string[] {
   const words: string[] = [];
   if (finding.cost !== null) words.push(`cost ${finding.cost.toLocaleString('en-GB')}`);
   if (finding.waitDays !== null)
     words.push(`wait ${String(finding.waitDays)} ${finding.waitDays === 1 ? 'day' : 'days'}`);
-  if (finding.burden !== null) words.push(`burden ${String(finding.burden)} of 3`);
+  if (finding.burden !== null) words.push(`burden ${burdenWords(finding.burden)}`);
   return words;
 }
 
