@@ -1,6 +1,5 @@
 import type { CaseListItem } from '@weighhouse/shared/contracts/cases';
 import type { Differential, PanelView } from '@weighhouse/shared/contracts/differential';
-import type { ErrorBody } from '@weighhouse/shared/contracts/errors';
 import { assess } from '@weighhouse/shared/reasoning/assess';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
@@ -20,6 +19,7 @@ import {
   unsealedCase,
 } from '../factories/judgements.js';
 import { type RunningApp, startApp } from '../setup/app.js';
+import { refusal } from '../setup/refusals.js';
 
 let running: RunningApp;
 beforeAll(async () => {
@@ -34,27 +34,9 @@ const listed = async (case_: JudgedCase, person: SeatedPerson) =>
   ((await person.agent.get('/api/cases?size=100').expect(200)).body as { items: CaseListItem[] }).items.find(
     (item) => item.id === case_.id,
   );
-const errorOf = (answer: { body: unknown }) => (answer.body as ErrorBody).error;
 
-/** The keys of an assessment that the answer carries, as assess() computes them from a panel. */
-function assessed(panel: PanelView): Record<string, unknown> {
-  const whole = JSON.parse(JSON.stringify(assess(panel))) as Record<string, unknown>;
-  const { method, priorGiven, pooledPrior, pooledCells, unjudged, standing, own, linearPool } = whole;
-  const { disagreementBits, rows, range } = whole;
-  return {
-    method,
-    priorGiven,
-    pooledPrior,
-    pooledCells,
-    unjudged,
-    standing,
-    own,
-    linearPool,
-    disagreementBits,
-    rows,
-    range,
-  };
-}
+/** The assessment as the answer carries it. */
+const assessed = (panel: PanelView) => JSON.parse(JSON.stringify(assess(panel))) as unknown;
 
 describe('the differential', () => {
   it('is exactly what assess() makes of the panel route, for each who may see it', async () => {
@@ -212,7 +194,7 @@ describe('the differential', () => {
       .expect(200);
     expect((await readDifferential(case_, case_.chair)).assessment).toBeNull();
     const panel = await case_.chair.agent.get(`/api/cases/${case_.id}/panel`);
-    expect([panel.status, errorOf(panel).id]).toEqual([422, 'panel-refused']);
+    expect([panel.status, refusal(panel).id]).toEqual([422, 'panel-refused']);
     expect((await listed(case_, case_.chair))?.leader).toBeNull();
   });
 });
@@ -260,7 +242,7 @@ describe('who may read it', () => {
       await running.agent().get(route).expect(401);
     }
     const early = await case_.chair.agent.get(`/api/cases/${case_.id}/panel`);
-    expect([early.status, errorOf(early).id]).toEqual([409, 'wrong-state']);
+    expect([early.status, refusal(early).id]).toEqual([409, 'wrong-state']);
     const empty = await readDifferential(case_, case_.chair);
     expect(empty).toMatchObject({
       round: null,
@@ -271,6 +253,6 @@ describe('who may read it', () => {
     });
     await openRound(case_, 'sealed');
     const sealed = await case_.chair.agent.get(`/api/cases/${case_.id}/panel`);
-    expect([sealed.status, errorOf(sealed).id]).toEqual([403, 'sealed']);
+    expect([sealed.status, refusal(sealed).id]).toEqual([403, 'sealed']);
   });
 });

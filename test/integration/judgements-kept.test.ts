@@ -1,5 +1,4 @@
 import { randomUUID } from 'node:crypto';
-import type { ErrorBody } from '@weighhouse/shared/contracts/errors';
 import type { JudgementDraft } from '@weighhouse/shared/contracts/judgements';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
@@ -14,6 +13,7 @@ import {
   unsealedCase,
 } from '../factories/judgements.js';
 import { type RunningApp, startApp } from '../setup/app.js';
+import { refusal } from '../setup/refusals.js';
 
 let running: RunningApp;
 let case_: JudgedCase;
@@ -31,8 +31,6 @@ beforeAll(async () => {
   set = (await readDifferential(case_, ann)).candidateSet;
 });
 afterAll(() => running.close());
-
-const refusal = (answer: { body: unknown }) => (answer.body as ErrorBody).error;
 
 describe('a draft', () => {
   const draft = (target: string) => ({

@@ -1,5 +1,4 @@
 import { randomUUID } from 'node:crypto';
-import type { ErrorBody } from '@weighhouse/shared/contracts/errors';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
   acceptedCase,
@@ -12,6 +11,7 @@ import {
   unsealedCase,
 } from '../factories/judgements.js';
 import { type RunningApp, startApp } from '../setup/app.js';
+import { paths, refusal } from '../setup/refusals.js';
 
 let running: RunningApp;
 let case_: JudgedCase;
@@ -30,8 +30,6 @@ beforeAll(async () => {
 });
 afterAll(() => running.close());
 
-const refusal = (answer: { body: unknown }) => (answer.body as ErrorBody).error;
-const paths = (answer: { body: unknown }) => refusal(answer).fields?.map((field) => field.path);
 const priorRoute = () => `/api/cases/${case_.id}/judgement/prior`;
 const rowRoute = (finding: number) =>
   `/api/cases/${case_.id}/judgement/findings/${case_.findings[finding]?.id ?? ''}`;

@@ -1,6 +1,5 @@
 import { randomUUID } from 'node:crypto';
 import type { Case } from '@weighhouse/shared/contracts/cases';
-import type { ErrorBody } from '@weighhouse/shared/contracts/errors';
 import type { Round } from '@weighhouse/shared/contracts/rounds';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
@@ -15,6 +14,7 @@ import {
   seat,
 } from '../factories/judgements.js';
 import { type RunningApp, startApp } from '../setup/app.js';
+import { paths, refusal } from '../setup/refusals.js';
 
 let running: RunningApp;
 beforeAll(async () => {
@@ -23,8 +23,6 @@ beforeAll(async () => {
 });
 afterAll(() => running.close());
 
-const refusal = (answer: { body: unknown }) => (answer.body as ErrorBody).error;
-const paths = (answer: { body: unknown }) => refusal(answer).fields?.map((field) => field.path);
 const roundsOf = async (case_: JudgedCase, person: { agent: JudgedCase['chair']['agent'] }) =>
   ((await person.agent.get(`/api/cases/${case_.id}/rounds`).expect(200)).body as { items: Round[] }).items;
 
