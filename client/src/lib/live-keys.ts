@@ -11,6 +11,7 @@ const stale: Record<ChangedWhat, readonly string[]> = {
   reports: ['case', 'reports', 'trail'],
   candidates: ['case', 'candidates', 'differential', 'panel', 'trail'],
   findings: ['case', 'findings', 'differential', 'panel', 'trail'],
+  agenda: ['case', 'differential', 'trail'],
   round: ['case', 'rounds', 'seals', 'differential', 'panel', 'plan', 'trail'],
   judgements: ['case', 'differential', 'panel'],
   plan: ['case', 'plan', 'summary', 'trail'],
@@ -29,5 +30,5 @@ export function isGap(last: number | undefined, revision: number): boolean {
 
 /** Judgements move a single number on a list; everything else can change what waits for a person. */
 export function touchesLists(what: ChangedWhat): boolean {
-  return what !== 'findings' && what !== 'reports';
+  return what !== 'findings' && what !== 'agenda' && what !== 'reports';
 }

@@ -1,3 +1,4 @@
+import { AgendaItemRow } from './agenda/agenda-item.entity.js';
 import { JudgementDraftRow } from './judgements/judgement-draft.entity.js';
 import { JudgementValue } from './judgements/judgement-value.entity.js';
 import { JudgementVersion } from './judgements/judgement-version.entity.js';
@@ -17,4 +18,5 @@ export const differentialEntities = [
   JudgementDraftRow,
   StandingSnapshot,
   StandingShare,
+  AgendaItemRow,
 ];

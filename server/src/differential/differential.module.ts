@@ -2,6 +2,9 @@ import { Module } from '@nestjs/common';
 import { CasesModule } from '../cases/cases.module.js';
 import { FindingsModule } from '../findings/findings.module.js';
 import { PeopleModule } from '../people/people.module.js';
+import { AgendaController } from './agenda/agenda.controller.js';
+import { AgendaReader } from './agenda/agenda-reader.js';
+import { AgendaService } from './agenda/agenda.service.js';
 import { DraftsController } from './judgements/drafts.controller.js';
 import { DraftsService } from './judgements/drafts.service.js';
 import { JudgementStore } from './judgements/judgement-store.js';
@@ -33,6 +36,7 @@ import { PanelService } from './view/panel.service.js';
 const rounds = [RoundReader, RoundViews, RoundsService, OpenRoundsService, HandInsService, EndRoundsService];
 const judgements = [JudgementStore, JudgementWriter, JudgementsService, OwnJudgements, DraftsService];
 const pool = [Evidence, PoolReader, Snapshots, Assessments, StandingService];
+const agenda = [AgendaReader, AgendaService];
 const views = [DifferentialService, LedgerParts, MineService, PanelService, SealsService];
 
 /** Judging: rounds, judgements and their seals, the pool and where the panel stands. */
@@ -44,9 +48,10 @@ const views = [DifferentialService, LedgerParts, MineService, PanelService, Seal
     JudgementsController,
     DraftsController,
     DifferentialController,
+    AgendaController,
     SealsController,
   ],
-  providers: [...rounds, ...judgements, ...pool, ...views],
+  providers: [...rounds, ...judgements, ...pool, ...agenda, ...views],
   exports: [StandingService, RoundReader, EndRoundsService, DifferentialService, PanelService],
 })
 export class DifferentialModule {}

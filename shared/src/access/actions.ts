@@ -61,6 +61,7 @@ export const rules = {
   'judgement.draft': { parts: ['contributor'], states: ['judging'] },
   'judgement.handIn': { parts: ['contributor'], states: ['judging'], needsRound: true },
   'differential.read': { parts: team, anyChairWhileSubmitted: true },
+  'agenda.change': { parts: ['chair'], states: ['judging'] },
   'seal.read': { parts: team },
   'seal.verify': { parts: ['contributor', 'chair'] },
   'panel.read': { parts: team },

@@ -41,6 +41,32 @@ export const otherSchema = z
   .meta({ id: 'Other' });
 export type Other = z.infer<typeof otherSchema>;
 
+/** A row that the chair wants discussed first, with the words why. */
+export const agendaItemSchema = z
+  .object({
+    findingId: idSchema,
+    note: z.string(),
+    version: versionSchema,
+    addedBy: z.string(),
+    addedAt: momentSchema,
+  })
+  .meta({ id: 'AgendaItem' });
+export type AgendaItem = z.infer<typeof agendaItemSchema>;
+export const putOnAgendaSchema = z
+  .object({
+    note: z
+      .string({ error: 'must say in words what to discuss' })
+      .trim()
+      .min(1, 'must say in words what to discuss')
+      .max(1000, 'must have at most 1,000 characters'),
+    /** The version one last saw, 0 where it was not on the agenda; left out, the save is unconditional. */
+    version: versionSchema.optional(),
+  })
+  .meta({ id: 'PutOnAgenda' });
+export type PutOnAgenda = z.infer<typeof putOnAgendaSchema>;
+/** The query of taking a row off: the version one last saw; left out, it is taken off as it is. */
+export const takeOffAgendaSchema = z.object({ version: z.coerce.number().pipe(versionSchema).optional() });
+
 export const differentialSchema = z
   .object({
     caseId: idSchema,
@@ -60,6 +86,8 @@ export const differentialSchema = z
     /** Where the panel stood before the open or last round, by today's columns; null where a column is new. */
     before: z.array(z.number().nullable()).nullable(),
     others: z.array(otherSchema).nullable(),
+    /** What to discuss first, in the order in which it was put there. */
+    agenda: z.array(agendaItemSchema),
     abilities: z.array(z.string()),
   })
   .meta({ id: 'Differential' });

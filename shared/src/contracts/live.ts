@@ -21,6 +21,7 @@ export const changedWhat = [
   'reports',
   'candidates',
   'findings',
+  'agenda',
   'round',
   'judgements',
   'plan',

@@ -3,6 +3,7 @@ import type { CaseAction } from '@weighhouse/shared/access/actions';
 import type { Differential } from '@weighhouse/shared/contracts/differential';
 import { CaseAccess } from '../../cases/case-access.js';
 import type { Actor } from '../../platform/http/actor.js';
+import { AgendaReader } from '../agenda/agenda-reader.js';
 import { Assessments } from '../pool/assessments.js';
 import { type CasePool, openRound } from '../pool/case-pool.js';
 import { PoolReader } from '../pool/pool-reader.js';
@@ -21,6 +22,7 @@ export class DifferentialService {
     private readonly assessments: Assessments,
     private readonly standings: StandingService,
     private readonly ledgers: LedgerParts,
+    private readonly agenda: AgendaReader,
   ) {}
 
   /**
@@ -44,6 +46,7 @@ export class DifferentialService {
         sealed: round?.state === 'open' && round.kind === 'sealed',
         assessment: this.assessments.of(pool, view),
         before: round ? await this.standings.before(pool, round.id, em) : null,
+        agenda: await this.agenda.of(pool, em),
         abilities: abilitiesNow(opened.abilities, pool, actor.id),
         ...parts,
       };

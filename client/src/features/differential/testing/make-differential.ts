@@ -121,6 +121,7 @@ export function makeDifferential(parts: Partial<Differential> = {}): Differentia
     assessment: null,
     before: null,
     others: null,
+    agenda: [],
     abilities: [],
     ...parts,
   };
