@@ -26,7 +26,7 @@ const source = (parts: Partial<PanelSource> = {}): PanelSource => ({
   candidateSet: 2,
   candidateIds: ['a', 'b'],
   findings: [finding('f1'), finding('f2', { observed: null })],
-  settings: { tempering: 0.6, groups: [], together: [] },
+  settings: { coexistence: 0, tempering: 0.6, groups: [], together: [] },
   contributors: [
     { key: 'c1', weight: 2, judgements: judged(prior(2, [300, 200, 500]), row('f1', [650, 450, 100])) },
   ],
@@ -99,6 +99,7 @@ describe('the panel', () => {
           finding('f2', { groupId: 'dissolved' }),
         ],
         settings: {
+          coexistence: 0.1,
           tempering: 1,
           groups: [{ id: 'g1', label: 'one mechanism', overlap: 0.33, reason: null }],
           together: [
@@ -108,7 +109,7 @@ describe('the panel', () => {
         },
       }),
     );
-    expect(panel.groups).toEqual([{ id: 'g1', overlap: 0.33 }]);
+    expect(panel).toMatchObject({ coexistence: 0.1, tempering: 1, groups: [{ id: 'g1', overlap: 0.33 }] });
     expect(panel.together).toEqual([{ a: 1, b: 0, times: 3 }]);
     expect(panel.findings).toEqual([
       { id: 'f1', levels: 2, observed: 1, reliability: 1, group: 'g1', cost: 0, waitDays: 3, burden: 2 },

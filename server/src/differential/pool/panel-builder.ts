@@ -19,7 +19,7 @@ export interface PanelSource {
     Finding,
     'id' | 'levelLabels' | 'observed' | 'reliability' | 'groupId' | 'cost' | 'waitDays' | 'burden'
   >[];
-  settings: Pick<Settings, 'tempering' | 'groups' | 'together'>;
+  settings: Pick<Settings, 'coexistence' | 'tempering' | 'groups' | 'together'>;
   contributors: readonly PooledContributor[];
 }
 
@@ -33,7 +33,7 @@ export const priorInForce = (prior: SavedVersion | undefined, candidateSet: numb
   prior !== undefined && prior.candidateSet === candidateSet && prior.values.length > 0;
 
 /**
- * The panel exactly as assess() takes it (the wire form of the method), one cause: coexistence 0. Numbers are
+ * The panel exactly as assess() takes it (the wire form of the method), read as the case says. Numbers are
  * fractions. Contributors of whom nothing may be pooled are left out.
  */
 export function buildPanel(source: PanelSource): PanelView {
@@ -41,7 +41,7 @@ export function buildPanel(source: PanelSource): PanelView {
   const known = new Set(groups.map((group) => group.id));
   return {
     candidates: [...source.candidateIds],
-    coexistence: 0,
+    coexistence: source.settings.coexistence,
     tempering: source.settings.tempering,
     together: pairsOf(source),
     groups,

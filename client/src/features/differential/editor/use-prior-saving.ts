@@ -8,7 +8,7 @@ import { readPrior } from '../typing/read-draft';
 
 /** What the prior's form does: typing and saving. */
 export function usePriorSaving() {
-  const { differential, columns } = useLedger();
+  const { saved: differential, columns } = useLedger();
   const store = useDraftStore();
   const hand = useDraft(differential, 'prior', columns);
   const save = useSavePrior(differential.caseId);

@@ -10,7 +10,7 @@ import { type DraftFault, readRow } from '../typing/read-draft';
 
 /** What the row editor does: typing, saving, clearing and taking a clearing back. */
 export function useRowSaving(finding: Finding) {
-  const { differential, columns } = useLedger();
+  const { saved: differential, columns } = useLedger();
   const store = useDraftStore();
   const hand = useDraft(differential, finding.id, columns);
   const save = useSaveRowJudgement(differential.caseId);

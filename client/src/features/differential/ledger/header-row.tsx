@@ -1,4 +1,5 @@
 import { withSoftHyphens } from '../model/soft-hyphens';
+import { AssumptionSwitch } from '../reading/assumption-switch';
 import { useLedger } from './ledger-context';
 
 /** The candidates as columns. */
@@ -7,7 +8,7 @@ export function HeaderRow() {
   return (
     <tr>
       <th scope="col" className="ledger-assumption">
-        Assumption: <b>one cause</b>
+        <AssumptionSwitch />
       </th>
       {columns.map((column) => (
         <th key={column.id} scope="col" className="ledger-candidate" title={column.name}>

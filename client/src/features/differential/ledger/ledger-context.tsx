@@ -4,6 +4,7 @@ import { createContext, type ReactNode, use, useMemo, useState } from 'react';
 import { useUnsavedTargets } from '../drafts/use-draft';
 import { type Column, columnsOf } from '../model/columns';
 import { rowsInOrder } from '../model/rows';
+import { type Reading, useReading } from '../reading/use-reading';
 
 /** A field in the editor that a cell of the ledger leads to. */
 export interface TypeAt {
@@ -17,10 +18,14 @@ export type Panel =
   /** The target is a finding's id, `prior` or `standing`. */
   | { kind: 'why'; target: string; column: number }
   | { kind: 'finding'; findingId: string | null }
-  | { kind: 'pooled' | 'round' | 'seals' | 'candidates' | 'groups' };
+  | { kind: 'pooled' | 'round' | 'seals' | 'candidates' | 'groups' | 'assumption' | 'sets' };
 
 export interface Ledger {
+  /** As it is read on this screen: its assessment and everything beside it belong to the reading in force. */
   differential: Differential;
+  /** As it is saved: for whatever is written back. The same object while the panel's own reading is shown. */
+  saved: Differential;
+  reading: Reading;
   columns: Column[];
   /** In the order in which they are shown. */
   rows: Finding[];
@@ -47,15 +52,17 @@ interface Props {
   children: ReactNode;
 }
 
-export function LedgerProvider({ differential, first, children }: Props) {
+export function LedgerProvider({ differential: saved, first, children }: Props) {
   const [panel, open] = useState<Panel | null>(first);
-  const columns = useMemo(() => columnsOf(differential.candidates), [differential.candidates]);
+  const columns = useMemo(() => columnsOf(saved.candidates), [saved.candidates]);
+  const { differential, reading } = useReading(saved, columns);
   const rows = useMemo(() => rowsInOrder(differential.findings), [differential.findings]);
-  const unsaved = useUnsavedTargets(differential, columns);
+  const unsaved = useUnsavedTargets(saved, columns);
   const ledger = useMemo<Ledger>(() => {
-    const may = (ability: string) => differential.abilities.includes(ability);
-    return { differential, columns, rows, canJudge: mayJudge(differential), may, unsaved, panel, open };
-  }, [differential, columns, rows, unsaved, panel]);
+    const may = (ability: string) => saved.abilities.includes(ability);
+    const canJudge = mayJudge(saved);
+    return { differential, saved, reading, columns, rows, canJudge, may, unsaved, panel, open };
+  }, [differential, saved, reading, columns, rows, unsaved, panel]);
   return <LedgerContext value={ledger}>{children}</LedgerContext>;
 }
 

@@ -5,6 +5,7 @@ import { MarksKey } from '../../../components/marks/marks-key';
 import { LedgerCards } from '../cards/ledger-cards';
 import { SidePanel } from '../panels/side-panel';
 import { PriorFirst } from '../prior-first/prior-first';
+import { ReadingBand } from '../reading/reading-band';
 import { RoundBar } from '../rounds/round-bar';
 import { useSeenDigests } from '../seals/use-seen-digests';
 import { EmptyLedger } from './empty-ledger';
@@ -17,14 +18,14 @@ import { usePhone } from './use-media';
 
 /** The whole section: the round, the ledger, and what stands at its side. */
 export function LedgerScreen() {
-  const { differential, canJudge, columns, rows, open, may } = useLedger();
+  const { differential, saved, canJudge, columns, rows, open, may } = useLedger();
   const phone = usePhone();
   const [compact, setCompact] = useCompact();
   const main = useRef<HTMLDivElement>(null);
   useSeenDigests(differential.round);
 
   // The prior comes before the rows, so that the findings are not counted twice.
-  if (canJudge && differential.mine?.prior === null) return <PriorFirst />;
+  if (canJudge && saved.mine?.prior === null) return <PriorFirst />;
   const empty = columns.length === 1 && rows.length === 0;
   return (
     <section className="ledger-section" aria-label="Differential">
@@ -41,6 +42,7 @@ export function LedgerScreen() {
           </Button>
         )}
       </RoundBar>
+      <ReadingBand />
       <PriorAgain />
       <div className="ledger-work">
         <div ref={main} className="ledger-main">

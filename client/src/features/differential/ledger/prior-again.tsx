@@ -3,7 +3,7 @@ import { useLedger } from './ledger-context';
 
 /** After a change of the candidates: one's prior is asked for again. */
 export function PriorAgain() {
-  const { differential, canJudge, open, panel } = useLedger();
+  const { saved: differential, canJudge, open, panel } = useLedger();
   const { mine } = differential;
   if (!canJudge || !mine?.prior || mine.priorInForce || panel?.kind === 'prior') return null;
   return (

@@ -55,6 +55,8 @@ export function standingLines(differential: Differential): string[] {
   }
   const people = Object.keys(assessment.own).length;
   const lines = [`Pooled from ${counted(people, 'contributor')}.`];
+  if (differential.settings.coexistence > 0)
+    lines.push('Each has its own share: a patient may have several, so they need not sum to 100.');
   if (shownRound && sealed)
     lines.push(
       `As round ${String(shownRound.number)} left it: round ${String(round?.number ?? 0)} is sealed.`,

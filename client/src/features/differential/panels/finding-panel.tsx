@@ -5,7 +5,7 @@ import { SideHeading } from './side-panel';
 
 /** Adds a finding, or changes one. */
 export function FindingPanel({ findingId }: { findingId: string | null }) {
-  const { differential, open } = useLedger();
+  const { saved: differential, open } = useLedger();
   const [params] = useSearchParams();
   const finding = differential.findings.find((one) => one.id === findingId) ?? null;
   const page = Number(params.get('page'));

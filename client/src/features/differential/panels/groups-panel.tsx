@@ -5,7 +5,7 @@ import { SideHeading } from './side-panel';
 
 /** The groups of findings that one mechanism explains; the chair changes them with a reason. */
 export function GroupsPanel() {
-  const { differential, may } = useLedger();
+  const { saved: differential, may } = useLedger();
   const change = useChangeSettings(differential.caseId);
   return (
     <>
@@ -29,7 +29,7 @@ export function GroupsPanel() {
 }
 
 function GroupsList() {
-  const { groups } = useLedger().differential.settings;
+  const { groups } = useLedger().saved.settings;
   if (groups.length === 0) return <p className="soft">No groups. The chair makes them.</p>;
   return (
     <ul className="side-list">

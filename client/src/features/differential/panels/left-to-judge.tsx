@@ -4,7 +4,7 @@ import { counted } from '../../../lib/words';
 
 /** What a contributor has still blank, as a way to the next row. */
 export function LeftToJudge() {
-  const { differential, canJudge, open, unsaved } = useLedger();
+  const { saved: differential, canJudge, open, unsaved } = useLedger();
   const { mine } = differential;
   if (!canJudge || !mine) return null;
   const blanks = blanksOf(mine, differential.findings);

@@ -7,7 +7,7 @@ import { SideHeading } from './side-panel';
 
 /** One's own prior, again: after a change of the candidates, or because one thinks otherwise now. */
 export function PriorPanel() {
-  const { differential, columns } = useLedger();
+  const { saved: differential, columns } = useLedger();
   const [saved, setSaved] = useState(false);
   const { mine } = differential;
   const given = mine?.prior && mine.priorInForce ? mine.prior : null;

@@ -38,7 +38,7 @@ function HandInForm({
   mine,
   onClose,
 }: Omit<Props, 'open' | 'onOpenChange'> & { onClose: () => void }) {
-  const { differential } = useLedger();
+  const { saved: differential } = useLedger();
   const handIn = useHandIn(differential.caseId);
   const [noMore, setNoMore] = useState(false);
   const blanks = blanksOf(mine, differential.findings);
@@ -93,7 +93,7 @@ function HandInForm({
 
 /** What is missing, all of it by name. */
 function Blanks() {
-  const { differential, unsaved, rows } = useLedger();
+  const { saved: differential, unsaved, rows } = useLedger();
   const { mine } = differential;
   if (!mine) return null;
   const blanks = blanksOf(mine, differential.findings);

@@ -13,7 +13,7 @@ type Move = 'handIn' | 'open' | 'unseal' | 'close';
 
 /** The line above the ledger: which round, how many are in, and what this person can do with it. */
 export function RoundBar({ children }: { children?: ReactNode }) {
-  const { differential, may, open } = useLedger();
+  const { saved: differential, may, open } = useLedger();
   const [move, setMove] = useState<Move | null>(null);
   const now = useNow();
   const { round, settings, mine } = differential;
