@@ -1,26 +1,15 @@
 import type { Report } from '@weighhouse/shared/contracts/reports';
 import { useState } from 'react';
 import { Failure } from '../../../components/failure';
-import { offlineError } from '../../../lib/api-error';
 import { contentPath } from '../api/list-reports';
+import { useLoadFailure } from './use-load-failure';
 import { ZoomButtons } from './zoom-buttons';
 
 /** A picture; it scrolls in its own frame when it is enlarged. */
 export function ImageReader({ report }: { report: Report }) {
   const [zoom, setZoom] = useState(1);
-  const [attempt, setAttempt] = useState(0);
-  const [failed, setFailed] = useState(false);
-  if (failed)
-    return (
-      <Failure
-        error={offlineError()}
-        what="The picture could not be loaded."
-        retry={() => {
-          setFailed(false);
-          setAttempt((count) => count + 1);
-        }}
-      />
-    );
+  const { attempt, error, failed, again } = useLoadFailure(report.id);
+  if (error !== null) return <Failure error={error} what="The picture could not be loaded." retry={again} />;
   return (
     <>
       <div className="reader-tools">
@@ -32,9 +21,7 @@ export function ImageReader({ report }: { report: Report }) {
           src={contentPath(report.id)}
           alt={`Report ${report.fileName}`}
           style={{ width: `${String(zoom * 100)}%` }}
-          onError={() => {
-            setFailed(true);
-          }}
+          onError={failed}
         />
       </div>
     </>

@@ -2,19 +2,24 @@ import { Button, TextField } from '@radix-ui/themes';
 import { type KeyboardEvent, useState } from 'react';
 import { Failure } from '../../../components/failure';
 import { SkeletonText } from '../../../components/skeleton';
-import { offlineError } from '../../../lib/api-error';
-import { contentPath } from '../api/list-reports';
 import { PdfPage } from './pdf-page';
 import type { ReaderProps } from './reader';
-import { usePdf } from './use-pdf';
+import { type FileFault, usePdf } from './use-pdf';
 import { pageForKey, zoomed } from './zoom';
 import { ZoomButtons } from './zoom-buttons';
 
+const faultWords: Record<FileFault, string> = {
+  locked: 'This PDF is locked with a password, so it cannot be read here. Ask for it without one.',
+  broken:
+    'This PDF is damaged and cannot be read here. Ask for it again, or download it and try another program.',
+};
+
 /** A PDF page by page; arrow keys, Page Up and Down, Home and End turn pages, plus and minus zoom. */
 export function PdfReader({ report, page: asked, onPage }: ReaderProps) {
-  const { pdf, error, retry } = usePdf(contentPath(report.id));
+  const { pdf, fileFault, error, again } = usePdf(report.id);
   const [zoom, setZoom] = useState(1);
-  if (error !== null) return <PdfFailure error={error} retry={retry} />;
+  if (fileFault !== null) return <p className="failure">{faultWords[fileFault]}</p>;
+  if (error !== null) return <Failure error={error} what="The report could not be loaded." retry={again} />;
   if (!pdf) return <SkeletonText lines={12} />;
   const pages = pdf.numPages;
   const page = Math.min(asked, pages);
@@ -102,19 +107,5 @@ function PageNumber({ page, pages, onPage }: TurnProps & { page: number }) {
       />
       <span className="small soft">of {pages}</span>
     </form>
-  );
-}
-
-function PdfFailure({ error, retry }: { error: unknown; retry: () => void }) {
-  const locked = (error as Error).name === 'PasswordException';
-  const broken = (error as Error).name === 'InvalidPDFException';
-  if (!locked && !broken)
-    return <Failure error={offlineError()} what="The report could not be loaded." retry={retry} />;
-  return (
-    <p className="failure">
-      {locked
-        ? 'This PDF is locked with a password, so it cannot be read here. Ask for it without one.'
-        : 'This PDF is damaged and cannot be read here. Ask for it again, or download it and try another program.'}
-    </p>
   );
 }

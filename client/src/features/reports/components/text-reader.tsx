@@ -2,28 +2,16 @@ import { useQuery } from '@tanstack/react-query';
 import type { Report } from '@weighhouse/shared/contracts/reports';
 import { Failure } from '../../../components/failure';
 import { SkeletonText } from '../../../components/skeleton';
-import { errorFrom } from '../../../lib/api';
-import { offlineError } from '../../../lib/api-error';
-import { contentPath } from '../api/list-reports';
+import { getContent } from '../api/get-content';
 
 /** More characters than this make a page slow; the rest is in the download. */
 const shown = 500_000;
-
-async function getText(reportId: string, signal: AbortSignal): Promise<string> {
-  const response = await fetch(contentPath(reportId), { signal }).catch((error: unknown) => {
-    if (signal.aborted) throw error;
-    throw offlineError();
-  });
-  const text = await response.text();
-  if (!response.ok) throw errorFrom(response.status, text, null);
-  return text;
-}
 
 /** Plain text, as it is. */
 export function TextReader({ report }: { report: Report }) {
   const found = useQuery({
     queryKey: ['report-text', report.id],
-    queryFn: ({ signal }) => getText(report.id, signal),
+    queryFn: async ({ signal }) => (await getContent(report.id, signal)).text(),
     staleTime: Infinity,
   });
   if (found.data === undefined)
