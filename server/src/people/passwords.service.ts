@@ -19,7 +19,10 @@ export class PasswordsService {
    * password, somebody deactivated or who never accepted an invitation.
    */
   async personFor(email: string, password: string): Promise<PersonRow | null> {
-    const row = await this.withHash({ email });
+    const found = await this.withHash({ email });
+    // The database takes é for e and leaves out what nobody sees: other spellings would each be counted as an account
+    // of its own, and so let somebody guess on.
+    const row = found?.email === email ? found : null;
     const matches = await passwordMatches(row?.active === true ? row.passwordHash : null, password);
     return matches ? row : null;
   }
@@ -46,7 +49,7 @@ export class PasswordsService {
   private withHash(where: { id: string } | { email: string }): Promise<PersonRow | null> {
     return this.source.manager.findOne(PersonRow, {
       where,
-      select: { id: true, name: true, active: true, passwordHash: true },
+      select: { id: true, email: true, name: true, active: true, passwordHash: true },
     });
   }
 }

@@ -35,7 +35,7 @@ export class IdentityCardsService {
     const result = await this.work.run(async (work) => {
       const opened = await this.access.open(actor, caseId, 'identity.write', work.em);
       this.checkBirthDate(card.birthDate);
-      if (!(await this.boxes.close(work.em, caseId, actor.id, version, card))) {
+      if (!(await this.boxes.close(work.em, opened.file.id, actor.id, version, card))) {
         // Not thrown in here: the line of the opening must be committed.
         return { written: false, identity: await this.openCard(work.em, actor, opened) };
       }

@@ -1,7 +1,10 @@
 import { z } from 'zod';
 
-/** A random identifier, UUID version 4 (RFC 9562). */
-export const idSchema = z.uuid({ error: 'must be an identifier (UUID)' });
+/**
+ * A random identifier, UUID version 4 (RFC 9562). It is taken in any spelling and kept in the one it was made with: the
+ * database finds a row by either, but a hand-in or a card kept under the other would belong to nothing.
+ */
+export const idSchema = z.uuid({ error: 'must be an identifier (UUID)' }).toLowerCase();
 
 /** A moment in time as an ISO 8601 string in UTC. Rows may carry a Date; it leaves as a string. */
 export const momentSchema = z.preprocess(

@@ -40,15 +40,15 @@ export class HandInsService {
       const known = await this.rounds.byId(roundId, work.em);
       if (!known) throw notFound();
       const { file } = await this.access.open(actor, known.caseId, 'judgement.handIn', work.em);
-      await this.refuseUnlessOpen(roundId, actor.id, work.em);
-      const { version, document } = await this.toHandIn(file, roundId, actor.id, input.version, work.em);
+      await this.refuseUnlessOpen(known.id, actor.id, work.em);
+      const { version, document } = await this.toHandIn(file, known.id, actor.id, input.version, work.em);
       const missing = missingToHandIn(document, input.noMore === true);
       if (missing.length > 0) throw notReady(missing);
       const random = randomBytes(randomLength);
       const digest = await sealDigest(random, document);
       const handedInAt = this.clock.now();
       await work.em.insert(HandInRow, {
-        roundId,
+        roundId: known.id,
         personId: actor.id,
         handedInAt,
         version,
