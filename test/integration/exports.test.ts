@@ -109,6 +109,18 @@ describe('the export as PDF', () => {
     }
   });
 
+  it('names the weights to those who judge, and says nothing of them to the referrer', async () => {
+    const case_ = await unsealedCase(running, { weights: [2], ownPeople: true });
+    const textFor = async (person: SeatedPerson) => {
+      const { body } = await ask(case_, person, 'pdf').expect(200);
+      return (await readPdf(body as Buffer)).text;
+    };
+    expect(await textFor(case_.chair)).toMatch(/weight 2 .*weight 1/);
+    const forReferrer = await textFor(case_.referrer);
+    expect(forReferrer).toContain(case_.contributors[0]?.name);
+    expect(forReferrer).not.toMatch(/weight \d|sees such patients/);
+  });
+
   it('shows letters beyond Latin 1, and other scripts, as they are', async () => {
     const case_ = await unsealedCase(running, {
       candidates: ['Škoda–Łódź syndrome', 'β2-microglobulin ≥ 3, Жуков'],

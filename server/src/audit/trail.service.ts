@@ -3,6 +3,7 @@ import type { TrailEntry } from '@weighhouse/shared/contracts/trail';
 import { DataSource } from 'typeorm';
 import { CaseAccess } from '../cases/case-access.js';
 import { RoundReader } from '../differential/rounds/round-reader.js';
+import { viewOf } from '../differential/view/view-of.js';
 import { PeopleDirectory } from '../people/people-directory.js';
 import type { Actor } from '../platform/http/actor.js';
 import { trailLines } from './trail-lines.js';
@@ -19,7 +20,8 @@ export class TrailService {
 
   /**
    * The referrer and the chair see the whole case, everybody else their own acts. What was done in a round that is
-   * still sealed is seen by whoever did it alone; it is not counted for the others either.
+   * still sealed is seen by whoever did it alone; it is not counted for the others either. The referrer, who sees
+   * numbers without names, is not told who saved.
    */
   async read(
     actor: Actor,
@@ -33,6 +35,7 @@ export class TrailService {
         caseId,
         actorId: actor.id,
         ownOnly: !parts.includes('referrer') && !parts.includes('chair'),
+        unnamed: viewOf(parts) === 'anonymous',
         sealedRoundIds: await this.rounds.stillSealed(caseId, em),
       })
         .limit(size)

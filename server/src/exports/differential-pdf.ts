@@ -74,10 +74,13 @@ function findingWords({ title, observed, levelLabels, observedOn, reliability }:
 }
 
 function writeWeights(page: PdfPage, { file }: ExportFacts): void {
-  page.heading('Who judged, and how much each counts');
+  // The referrer is not told who counts how much: with names it would say whose the unnamed numbers are.
+  const weighed = file.team.some(({ weight }) => weight !== null);
+  page.heading(weighed ? 'Who judged, and how much each counts' : 'Who judged');
   for (const { person, part, weight, reason } of file.team) {
     if (part !== 'contributor') continue;
     const why = reason === null || reason === '' ? '' : ` (${reason})`;
-    page.item(`${person.name}, ${person.specialty}: weight ${String(weight ?? 1)}${why}`);
+    const counts = weight === null ? '' : `: weight ${String(weight)}${why}`;
+    page.item(`${person.name}, ${person.specialty}${counts}`);
   }
 }
