@@ -147,7 +147,7 @@ describe('reports', () => {
       'x-content-type-options': 'nosniff',
     });
     expect(whole.headers['content-security-policy']).toMatch(/default-src 'none'.*sandbox/);
-    expect(whole.headers['cache-control']).toMatch(/^private, no-cache$/);
+    expect(whole.headers['cache-control']).toMatch(/^private, no-store$/);
     expect(whole.headers['content-disposition']).toContain("filename*=UTF-8''Bericht%20%C3%9C.txt");
     const part = await read('bytes=0-9').expect(206);
     expect(part.text).toBe('Ultrasound');

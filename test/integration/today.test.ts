@@ -180,6 +180,21 @@ describe('what waits after judging', () => {
   });
 });
 
+describe('what waits of a withdrawn case', () => {
+  it('is the action of its owner, without what the case was about', async () => {
+    const closed = await concludedCase(running, { ownPeople: true });
+    const [owner] = closed.contributors;
+    if (!owner) throw new Error('the first contributor owns an action');
+    expect(await waits(owner, closed)).toMatchObject([{ detail: expect.stringContaining('fever') }]);
+    await closed.referrer.agent
+      .post(`/api/cases/${closed.id}/withdraw`)
+      .send({ words: 'Consent is withdrawn.' })
+      .expect(200);
+    expect(await waits(owner, closed)).toMatchObject([{ kind: 'act', detail: 'Your action' }]);
+    expect(JSON.stringify(await today(owner))).not.toMatch(/fever/i);
+  });
+});
+
 describe('the cases one sits on', () => {
   it('are those under way, with the next conference of them; closed ones are counted', async () => {
     const case_ = await unsealedCase(running, { ownPeople: true });

@@ -66,7 +66,7 @@ export class ActionsService {
     const plan = action && (await em.findOneBy(PlanRow, { id: action.planId }));
     if (!plan) throw notFound();
     if (action.ownerId === actor.id) return { action, plan };
-    await this.access.open(actor, plan.caseId, 'plan.read');
+    await this.access.open(actor, plan.caseId, 'plan.read', em);
     throw wrongPart();
   }
 }

@@ -1,4 +1,5 @@
 const longest = 120;
+const longestRead = 1000;
 
 /** Controls, joiners and direction marks: what makes a name read otherwise than it is (Unicode Cc, Cf, Cs, Zl, Zp). */
 const invisible = /[\p{Cc}\p{Cf}\p{Cs}\p{Zl}\p{Zp}\uFFFD]/gu;
@@ -9,7 +10,8 @@ const invisible = /[\p{Cc}\p{Cf}\p{Cs}\p{Zl}\p{Zp}\uFFFD]/gu;
  * @example safeFileName('../../a"b.pdf') is "ab.pdf"
  */
 export function safeFileName(name: string): string {
-  const last = name.split(/[/\\]/).at(-1) ?? '';
+  // Its end holds the ending; names of thousands of dots would take seconds to trim.
+  const last = (name.split(/[/\\]/).at(-1) ?? '').slice(-longestRead);
   const plain = last
     .normalize('NFC')
     .replace(invisible, '')

@@ -15,7 +15,7 @@ export async function sendReport(
 ): Promise<void> {
   const range = wantedRange(report, request);
   response.setHeader('Accept-Ranges', 'bytes');
-  response.setHeader('Cache-Control', 'private, no-cache');
+  response.setHeader('Cache-Control', 'private, no-store');
   response.setHeader('Content-Security-Policy', locked);
   response.setHeader('X-Content-Type-Options', 'nosniff');
   if (range === 'unsatisfiable') {

@@ -43,7 +43,7 @@ export class WaitingActions {
       {
         kind: 'act',
         title: asLiaison ? 'An action of the plan is yours' : what,
-        detail: asLiaison || !seat ? 'Your action' : `Your action: ${questionOf(file)}`,
+        detail: seat && mayOpen(seat) ? `Your action: ${questionOf(file)}` : 'Your action',
         path: asLiaison ? `/tell/${file.id}` : `/cases/${file.id}/plan`,
         since,
       },
@@ -51,6 +51,10 @@ export class WaitingActions {
     );
   }
 }
+
+/** Owners keep their actions when the case is withdrawn, and it is open to its referrer alone then. */
+const mayOpen = (seat: OwnCase): boolean =>
+  seesCase(seat) && (seat.file.state !== 'withdrawn' || seat.parts.includes('referrer'));
 
 const toAnswer = (file: CaseFile, since: Date): TodayItem =>
   todayItem(file, {

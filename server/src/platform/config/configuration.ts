@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { trustedProxies } from './trust-proxy.js';
 
 const placeholder = /^(change|changeme|secret|password|default|example|test|dev)/i;
 const flag = z.enum(['0', '1']).transform((value) => value === '1');
@@ -22,7 +23,15 @@ const schema = z
     S3_SECRET_KEY: z.preprocess(unset, z.string({ error: 'must be set' })),
     SMTP_URL: z.preprocess(unset, z.url({ error: 'must be set, for instance smtp://host:25' })),
     MAIL_FROM: z.preprocess(unset, z.string().default('Weighhouse <no-reply@weighhouse.invalid>')),
-    TRUST_PROXY: optional(z.string()),
+    TRUST_PROXY: optional(
+      z.string().transform((text, context) => {
+        const proxies = trustedProxies(text);
+        if (proxies !== null) return proxies;
+        const message = 'must be how many proxies stand in front, or their addresses, separated by commas';
+        context.addIssue({ code: 'custom', message });
+        return z.NEVER;
+      }),
+    ),
     TIME_ZONE: z.preprocess(
       unset,
       z

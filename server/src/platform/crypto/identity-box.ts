@@ -20,7 +20,10 @@ export function closeBox(key: Buffer, text: string, boundTo: string): Buffer {
 
 /** @throws Error when the key is another, the box was changed, or it belongs to something else */
 export function openBox(key: Buffer, box: Buffer, boundTo: string): string {
-  const decipher = createDecipheriv(algorithm, key, box.subarray(0, nonceLength));
+  // With its length said, a tag that was cut short is refused rather than checked in part.
+  const decipher = createDecipheriv(algorithm, key, box.subarray(0, nonceLength), {
+    authTagLength: tagLength,
+  });
   decipher.setAAD(Buffer.from(boundTo, 'utf8'));
   decipher.setAuthTag(box.subarray(nonceLength, nonceLength + tagLength));
   const sealed = box.subarray(nonceLength + tagLength);

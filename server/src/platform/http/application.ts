@@ -61,7 +61,7 @@ function requestLog(configuration: Configuration) {
     serializers: {
       req: (request: { method: string; url: string }) => ({
         method: request.method,
-        path: (request.url.split('?')[0] ?? '').replace(/(invitations\/)[^/]+/, '$1…'),
+        path: (request.url.split('?')[0] ?? '').replace(/(invitations\/)[^/]+/i, '$1…'),
       }),
       res: (response: { statusCode: number }) => ({ status: response.statusCode }),
     },
