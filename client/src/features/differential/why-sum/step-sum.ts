@@ -1,50 +1,71 @@
 import type { AssessmentView } from '@weighhouse/shared/contracts/assessment';
 import { type Against, decibansOf, factorOf, oddsOf } from './comparison';
-import { addedUp, type WhySum } from './why-sum';
+import { addedUp, type Push, type WhySum } from './why-sum';
 
 /** The standing when these findings count and no others; none at the start. */
 export type StandingWith = (counted: readonly string[]) => readonly number[];
 
-/**
- * The odds finding by finding: each push is what the odds change by when this finding is counted after those before
- * it. Adds up by construction, and holds where single columns do not add up: against everything else, and where
- * candidates may coexist.
- */
-export function stepSum(
-  order: readonly string[],
-  standingWith: StandingWith,
-  { column, against, oneCause }: { column: number; against: Against; oneCause: boolean },
-): WhySum {
-  const at = (standing: readonly number[]) => decibansOf(oddsOf(standing, column, against, oneCause));
-  const start = at(standingWith([]));
-  let before = start;
-  const steps = order.map((findingId, index) => {
-    const standing = standingWith(order.slice(0, index + 1));
-    const now = at(standing);
-    const decibans = now - before;
-    before = now;
-    return { findingId, decibans, share: standing[column] ?? 0 };
-  });
-  return addedUp(start, steps, true);
+export interface Comparison {
+  column: number;
+  against: Against;
+  oneCause: boolean;
 }
 
 /**
- * The findings that count, by how much the odds of this column would change without each: what matters most comes
- * first. The same measure under both assumptions; it does not depend on the order that it makes.
+ * The odds finding by finding: each push is what the odds change by when this finding is counted after those before
+ * it. Adds up by construction, and holds where single columns do not add up: against everything else, and where
+ * candidates may coexist. What matters most comes first: the order is by how much the odds would change if this
+ * finding alone were not counted.
+ *
+ * Yields how many standings have been asked for, so that whoever runs it can pause; there are 2 n + 2 in all.
+ * @param findings those that count, each once
  */
-export function orderBySize(
-  { standing, without }: Pick<AssessmentView, 'standing' | 'without'>,
-  column: number,
-  against: Against,
-  oneCause: boolean,
-): string[] {
-  const at = (shares: readonly number[]) => decibansOf(oddsOf(shares, column, against, oneCause));
-  const now = at(standing);
-  return Object.entries(without.findings)
-    .map(([findingId, shares]) => ({ findingId, size: Math.abs(now - at(shares)) }))
-    .toSorted((one, other) => other.size - one.size)
-    .map(({ findingId }) => findingId);
+export function* stepByStep(
+  findings: readonly string[],
+  standingWith: StandingWith,
+  { column, against, oneCause }: Comparison,
+): Generator<number, WhySum> {
+  let asked = 0;
+  const odds = (shares: readonly number[]) => decibansOf(oddsOf(shares, column, against, oneCause));
+  const now = odds(standingWith(findings));
+  yield ++asked;
+  const sizes: { findingId: string; size: number }[] = [];
+  for (const findingId of findings) {
+    const without = standingWith(findings.filter((other) => other !== findingId));
+    sizes.push({ findingId, size: Math.abs(now - odds(without)) });
+    yield ++asked;
+  }
+  const order = sizes.toSorted((one, other) => other.size - one.size).map(({ findingId }) => findingId);
+  const start = odds(standingWith([]));
+  yield ++asked;
+  const steps: Omit<Push, 'soFar'>[] = [];
+  let before = start;
+  for (const [index, findingId] of order.entries()) {
+    const standing = standingWith(order.slice(0, index + 1));
+    const after = odds(standing);
+    steps.push({ findingId, decibans: after - before, share: standing[column] ?? 0 });
+    before = after;
+    yield ++asked;
+  }
+  return addedUp(start, steps, true);
 }
+
+/** The same without pausing. */
+export function stepSum(
+  findings: readonly string[],
+  standingWith: StandingWith,
+  comparison: Comparison,
+): WhySum {
+  const steps = stepByStep(findings, standingWith, comparison);
+  for (;;) {
+    const next = steps.next();
+    if (next.done === true) return next.value;
+  }
+}
+
+/** The findings that are observed and judged: those whose row carries a weight of evidence. */
+export const countingFindings = ({ rows }: Pick<AssessmentView, 'rows'>): string[] =>
+  Object.entries(rows).flatMap(([id, row]) => (row.weightOfEvidence.length > 0 ? [id] : []));
 
 /** Under one cause the standing of some findings follows from the assessment: prior times what each row adds. */
 export function oneCauseStandings({ pooledPrior, rows }: Pick<AssessmentView, 'pooledPrior' | 'rows'>) {

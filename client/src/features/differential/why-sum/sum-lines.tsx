@@ -2,10 +2,9 @@ import type { AssessmentView } from '@weighhouse/shared/contracts/assessment';
 import { naturalFrequency } from '@weighhouse/shared/reasoning/natural-frequency';
 import { useLedger } from '../ledger/ledger-context';
 import type { Column } from '../model/columns';
-import { stateWords } from '../model/finding-words';
 import { type Against, factorOf } from './comparison';
 import { SumLane } from './sum-lane';
-import { becomesWords, columnWord, countsWords, oddsWords, oftenWords, signed } from './sum-words';
+import { seenIn, becomesWords, columnWord, countsWords, oddsWords, oftenWords, signed } from './sum-words';
 import type { Push } from './why-sum';
 
 interface About {
@@ -34,7 +33,9 @@ export function FindingPush({
   const often =
     other && here !== undefined && there !== undefined
       ? oftenWords(finding, [here, there], [column, other])
-      : `${stateWords(finding)}.`;
+      : here === undefined
+        ? ''
+        : seenIn(finding, here, column);
   const from = before ?? assessment.pooledPrior[column.index] ?? 0;
   return (
     <tr>

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { columnsOf } from '../model/columns';
 import { makeCandidate, makeFinding } from '../testing/make-differential';
-import { becomesWords, countsWords, oddsWords, oftenWords, signed, timesWords } from './sum-words';
+import { becomesWords, countsWords, oddsWords, oftenWords, seenIn, signed, timesWords } from './sum-words';
 
 const [still, lymphoma, none] = columnsOf([makeCandidate('Still'), makeCandidate('Lymphoma')]);
 
@@ -53,6 +53,14 @@ describe('the words of the sum', () => {
     const bands = makeFinding({ levelLabels: ['normal', 'raised', 'above five times'], observed: 2 });
     expect(oftenWords(bands, [0.001, 0.2], [still, lymphoma])).toBe(
       '“above five times” is seen more than 100 times as often in B as in A: 20 and under 1 of 100.',
+    );
+  });
+
+  it('says how often it is seen in one column alone', () => {
+    if (!still || !none) throw new Error('columns');
+    expect(seenIn(makeFinding(), 0.62, still)).toBe('Seen in 62 of 100 with A.');
+    expect(seenIn(makeFinding({ observed: 0 }), 0.001, none)).toBe(
+      'Missing in under 1 of 100 with none of these.',
     );
   });
 

@@ -68,6 +68,10 @@ export function oftenWords(
   return `${seen} ${about} times as often in ${columnWord(more)} as in ${columnWord(less)}: ${figures(high, low)}.`;
 }
 
+/** What was observed in one column alone: "Seen in 62 of 100 with A." */
+export const seenIn = (finding: Finding, share: number, column: Column): string =>
+  `${seenWords(finding)} in ${naturalFrequency(share).words} with ${columnWord(column)}.`;
+
 function seenWords(finding: Finding): string {
   const level = finding.observed ?? 1;
   if (!isTwoLevel(finding)) return `“${levelName(finding, level)}” is seen`;

@@ -4,7 +4,7 @@ import { describe, expect, it } from 'vitest';
 import { columnSum } from './column-sum';
 import { decibansOf, oddsOf, runnerUp } from './comparison';
 import { countedPanel } from './counted-panel';
-import { oneCauseStandings, orderBySize, stepSum } from './step-sum';
+import { countingFindings, oneCauseStandings, stepByStep, stepSum } from './step-sum';
 
 const panelOf = (seed: number, coexistence = 0) =>
   randomPanel(
@@ -52,8 +52,7 @@ describe('a standing as a sum', () => {
     for (const seed of seeds) {
       const assessment = assess(panelOf(seed));
       const how = { column: 0, against: 'rest', oneCause: true } as const;
-      const order = orderBySize(assessment, 0, 'rest', true);
-      const sum = stepSum(order, oneCauseStandings(assessment), how);
+      const sum = stepSum(countingFindings(assessment), oneCauseStandings(assessment), how);
       const end = decibansOf(oddsOf(assessment.standing, 0, 'rest', true));
       expect(sum.end, `seed ${String(seed)}`).toBeCloseTo(end, 8);
       expect(sum.inThisOrder).toBe(true);
@@ -65,9 +64,8 @@ describe('a standing as a sum', () => {
       const panel = panelOf(seed, 0.02 + (seed % 9) / 20);
       const assessment = assess(panel);
       for (const against of ['rest', runnerUp(assessment.standing, 0)] as const) {
-        const order = orderBySize(assessment, 0, against, false);
         const sum = stepSum(
-          order,
+          countingFindings(assessment),
           (counted) => assess(countedPanel(panel, counted), { only: 'standing' }).standing,
           { column: 0, against, oneCause: false },
         );
@@ -81,13 +79,34 @@ describe('a standing as a sum', () => {
     for (const seed of seeds) {
       const panel = panelOf(seed);
       const assessment = assess(panel);
-      const order = orderBySize(assessment, 0, 'rest', true);
-      const some = order.slice(0, Math.ceil(order.length / 2));
+      const all = countingFindings(assessment);
+      const some = all.slice(0, Math.ceil(all.length / 2));
       const byPanel = assess(countedPanel(panel, some), { only: 'standing' }).standing;
       oneCauseStandings(assessment)(some).forEach((share, column) => {
         expect(byPanel[column], `seed ${String(seed)}`).toBeCloseTo(share, 9);
       });
     }
+  });
+
+  it('counts first what would change the odds most if it alone were left out, and can pause at every step', () => {
+    const assessment = assess(panelOf(11));
+    const how = { column: 0, against: 'rest', oneCause: true } as const;
+    const all = countingFindings(assessment);
+    const steps = stepByStep(all, oneCauseStandings(assessment), how);
+    let asked = 0;
+    let next = steps.next();
+    for (; next.done !== true; next = steps.next()) asked = next.value;
+    expect(asked).toBe(2 * all.length + 2);
+    const order = next.value.pushes.map(({ findingId }) => findingId);
+    const changes = order.map((findingId) => {
+      const left = oneCauseStandings(assessment)(all.filter((one) => one !== findingId));
+      return Math.abs(
+        decibansOf(oddsOf(assessment.standing, 0, 'rest', true)) - decibansOf(oddsOf(left, 0, 'rest', true)),
+      );
+    });
+    changes.slice(1).forEach((change, index) => {
+      expect(change).toBeLessThanOrEqual((changes[index] ?? 0) + 1e-9);
+    });
   });
 
   it('holds digits near one, where 1 less the share has none left', () => {
