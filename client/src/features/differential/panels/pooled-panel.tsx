@@ -1,17 +1,23 @@
-import { naturalFrequency } from '@weighhouse/shared/reasoning/natural-frequency';
 import { counted, listed } from '../../../lib/words';
 import { useLedger } from '../ledger/ledger-context';
-import { columnLabel } from '../model/columns';
 import { disagreementWords } from '../model/disagreement-words';
 import { reliabilityWord } from '../model/finding-words';
 import { voicesOf } from '../model/people';
+import { methodSentences, pairWords } from '../pooled/method-words';
+import { TakeAlong } from '../pooled/take-along';
+import { partingWords } from '../pooled/two-pools';
+import { TwoPoolsTable } from '../pooled/two-pools-table';
+import { useInFull } from '../why-sum/use-in-full';
+import { usePanelInForce } from '../why-sum/use-panel-in-force';
 import { SideHeading } from './side-panel';
 import { useWeights } from './use-weights';
 
 /** How the standing came about: method, weights, what was counted less, who was not in. */
 export function PooledPanel() {
   const { differential, columns } = useLedger();
-  const { assessment, settings, shownRound, sealed } = differential;
+  const { panel } = usePanelInForce();
+  const inFull = useInFull(panel);
+  const { assessment, shownRound, sealed } = differential;
   if (!assessment)
     return (
       <>
@@ -21,7 +27,7 @@ export function PooledPanel() {
             ? 'The round is sealed. Nothing is pooled before the chair unseals it.'
             : 'Nothing is judged yet.'}
         </p>
-        <Method method="weighhouse/1" tempering={settings.tempering} />
+        <Method method="weighhouse/1" />
       </>
     );
   return (
@@ -34,42 +40,13 @@ export function PooledPanel() {
           {shownRound.notIn.length > 0 && ` Not in, so not counted: ${listed(shownRound.notIn)}.`}
         </p>
       )}
-      <Method method={assessment.method} tempering={settings.tempering} />
+      <TakeAlong />
+      <Method method={assessment.method} />
       <Weights />
       <CountedLess />
       <h3 className="side-sub">Two ways to add up, and the range</h3>
-      <p className="small soft">
-        The average of where each stands alone keeps dissent visible. The range runs over leaving out each
-        contributor and each finding, and over stronger and no tempering.
-      </p>
-      <table className="why-table">
-        <thead>
-          <tr>
-            <th scope="col">Of 100</th>
-            <th scope="col" className="why-number">
-              Pool
-            </th>
-            <th scope="col" className="why-number">
-              Average
-            </th>
-            <th scope="col" className="why-number">
-              Range
-            </th>
-          </tr>
-        </thead>
-        <tbody>
-          {columns.map((column) => (
-            <tr key={column.id}>
-              <th scope="row">{columnLabel(column)}</th>
-              <td className="figures why-number">{whole(assessment.standing[column.index])}</td>
-              <td className="figures why-number">{whole(assessment.linearPool[column.index])}</td>
-              <td className="figures why-number">
-                {whole(assessment.range[column.index]?.low)} to {whole(assessment.range[column.index]?.high)}
-              </td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
+      <p className="small soft">{partingWords(assessment, columns)}</p>
+      <TwoPoolsTable assessment={assessment} inFull={inFull} />
       <p className="side-about">
         {disagreementWords(assessment.disagreementBits, Object.keys(assessment.own).length)}
       </p>
@@ -77,16 +54,15 @@ export function PooledPanel() {
   );
 }
 
-const whole = (share: number | undefined) => (share === undefined ? '–' : naturalFrequency(share).outOf100);
-
-function Method({ method, tempering }: { method: string; tempering: number }) {
+function Method({ method }: { method: string }) {
+  const { differential, columns } = useLedger();
+  const { panel } = usePanelInForce();
+  const { settings } = differential;
+  const about = panel ?? { tempering: settings.tempering, coexistence: 0 };
   return (
     <p className="side-about">
-      Logarithmic opinion pool, method <span className="figures">{method}</span>: priors and likelihoods of
-      all contributors are averaged by weight on the scale of log odds, then every finding is counted one
-      after the other. Every finding counts {Math.round(tempering * 100)} of 100 of its full strength
-      (tempering), because findings in one patient overlap more than anyone can list. One cause is assumed:
-      the candidates exclude each other.
+      Method <span className="figures">{method}</span>.{' '}
+      {methodSentences(about, pairWords(settings.together, columns)).join(' ')}
     </p>
   );
 }

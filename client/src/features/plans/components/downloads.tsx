@@ -1,6 +1,6 @@
 import { Button } from '@radix-ui/themes';
 import { FailureLine } from '../../../components/failure';
-import { type ExportFormat, useDownloadExport } from '../api/download-export';
+import { type ExportFormat, useDownloadExport } from '../../differential/api/download-export';
 
 const files: readonly { format: ExportFormat; label: string; ability: string }[] = [
   { format: 'pdf', label: 'Differential and plan as PDF', ability: 'export.read' },
