@@ -45,7 +45,7 @@ describe('the line under a finding', () => {
 
   it('says what a pending finding would take', () => {
     const finding = makeFinding({ observed: null, cost: 1400, waitDays: 1, burden: 2 });
-    expect(findingLine(finding, date)).toBe('Not known yet. Cost 1,400, wait 1 day, burden 2 of 3');
+    expect(findingLine(finding, date)).toBe('Not known yet. Cost 1,400, wait 1 day, burden some');
   });
 
   it('says why a row was struck out', () => {
