@@ -6,6 +6,8 @@ export interface GridActions {
   /** A digit is typed on a cell; whatever has the focus afterwards receives it. */
   type: (place: Place) => void;
   why: (place: Place) => void;
+  /** What can be done with the cell's column. */
+  menu: (place: Place) => void;
   escape: () => void;
   keys: () => void;
 }
@@ -68,6 +70,7 @@ export function useGrid(size: GridSize, actions: GridActions) {
   const actionOf = (key: string): ((place: Place) => void) | null => {
     if (key === 'Enter' || key === ' ') return actions.open;
     if (key === 'w') return actions.why;
+    if (key === 'm') return actions.menu;
     if (key === 'Escape') return actions.escape;
     return key === '?' ? actions.keys : null;
   };

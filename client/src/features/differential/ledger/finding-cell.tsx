@@ -1,24 +1,40 @@
 import type { Finding } from '@weighhouse/shared/contracts/findings';
 import { Beam } from '../../../components/marks/beam';
+import type { ShownColumn } from '../columns/arrange';
+import { stuckProps } from '../columns/stuck-props';
 import { cellSentence } from '../model/cell-words';
-import { cellView } from '../model/cells';
-import type { Column } from '../model/columns';
+import type { CellView } from '../model/cells';
 import { isTwoLevel, levelName } from '../model/finding-words';
-import { useLedger } from './ledger-context';
+import type { Panel } from './ledger-context';
 import { MovingFigure } from './moving-figure';
 
+interface Props {
+  finding: Finding;
+  of: ShownColumn;
+  /** Where it stands in the grid. */
+  row: number;
+  place: number;
+  cell: CellView;
+  /** The way to how the number came about; null where there is none to tell. */
+  why: ((panel: Panel) => void) | null;
+}
+
 /** What one finding says about one candidate: the figure, and the beam of its weight of evidence. */
-export function FindingCell({ finding, column, row }: { finding: Finding; column: Column; row: number }) {
-  const { differential, open } = useLedger();
-  const cell = cellView(differential, finding, column.index);
+export function FindingCell({ finding, of, row, place, cell, why }: Props) {
+  const { column, folded } = of;
   const named = cell.figure && !isTwoLevel(finding) && finding.observed === null;
+  const at = { 'data-row': row, 'data-column': place, tabIndex: -1 };
+  if (folded)
+    return (
+      <td {...at} {...stuckProps(of, 'ledger-cell ledger-folded')}>
+        <span className="aside-text">Folded. {cellSentence(cell, finding)}</span>
+      </td>
+    );
   return (
     <td
-      className="ledger-cell"
-      data-row={row}
-      data-column={column.index + 1}
+      {...at}
+      {...stuckProps(of, 'ledger-cell')}
       data-unjudged={cell.unjudged === 'no' ? undefined : cell.unjudged}
-      tabIndex={-1}
     >
       <span className="aside-text">{cellSentence(cell, finding)}</span>
       <span className="ledger-figure" aria-hidden="true">
@@ -33,14 +49,14 @@ export function FindingCell({ finding, column, row }: { finding: Finding; column
       {!cell.sealed && (cell.decibans !== null || cell.ticks.length > 0) && (
         <Beam decibans={cell.decibans} ticks={cell.ticks} own={cell.own} />
       )}
-      {differential.assessment && cell.figure && (
+      {why && cell.figure && (
         <button
           type="button"
           className="ledger-why"
           tabIndex={-1}
           aria-label={`Why ${column.short}, ${finding.title}`}
           onClick={() => {
-            open({ kind: 'why', target: finding.id, column: column.index });
+            why({ kind: 'why', target: finding.id, column: column.index });
           }}
         >
           why

@@ -1,31 +1,55 @@
 import type { Finding } from '@weighhouse/shared/contracts/findings';
 import { memo } from 'react';
 import { useFormat } from '../../../lib/use-format';
+import type { ShownColumn } from '../columns/arrange';
+import type { CellView } from '../model/cells';
 import { dayWords } from '../model/day-words';
 import { findingLine } from '../model/finding-words';
 import { FindingCell } from './finding-cell';
-import { useLedger } from './ledger-context';
+import type { Panel } from './ledger-context';
 
-/** One finding across the candidates. */
-export const FindingRow = memo(function FindingRow({ finding, row }: { finding: Finding; row: number }) {
-  const { columns, panel, unsaved } = useLedger();
+interface Props {
+  finding: Finding;
+  /** Where it stands in the grid. */
+  row: number;
+  shown: readonly ShownColumn[];
+  /** By the column's index; the same object as long as nothing of the row changed. */
+  cells: readonly CellView[];
+  selected: boolean;
+  unsaved: boolean;
+  why: ((panel: Panel) => void) | null;
+}
+
+/** One finding across the candidates. Drawn anew only where something of this row changed. */
+export const FindingRow = memo(function FindingRow(props: Props) {
+  const { finding, row, shown, cells, selected, unsaved, why } = props;
   const format = useFormat();
-  const selected =
-    (panel?.kind === 'row' && panel.findingId === finding.id) ||
-    (panel?.kind === 'why' && panel.target === finding.id);
   const state = finding.enteredInError ? 'error' : finding.observed === null ? 'pending' : 'observed';
   return (
     <tr className="ledger-row" data-state={state} aria-selected={selected}>
       <th scope="row" className="ledger-title" data-row={row} data-column={0} tabIndex={-1}>
         <span className="ledger-name">{finding.title}</span>
         <span className="ledger-line">
-          {unsaved.has(finding.id) && <b className="ledger-unsaved">Typed, not saved.</b>}
+          {unsaved && <b className="ledger-unsaved">Typed, not saved.</b>}
           {findingLine(finding, dayWords(format))}
         </span>
       </th>
-      {columns.map((column) => (
-        <FindingCell key={column.id} finding={finding} column={column} row={row} />
-      ))}
+      {shown.map((one, index) => {
+        const cell = cells[one.column.index];
+        return (
+          cell && (
+            <FindingCell
+              key={one.column.id}
+              finding={finding}
+              of={one}
+              row={row}
+              place={index + 1}
+              cell={cell}
+              why={why}
+            />
+          )
+        );
+      })}
     </tr>
   );
 });

@@ -1,24 +1,30 @@
-import { withSoftHyphens } from '../model/soft-hyphens';
+import type { ShownColumn } from '../columns/arrange';
 import { AssumptionSwitch } from '../reading/assumption-switch';
-import { useLedger } from './ledger-context';
+import { CandidateHeader } from './candidate-header';
+
+interface Props {
+  shown: readonly ShownColumn[];
+  /** The id of the column whose menu is open. */
+  menu: string | null;
+  onMenu: (id: string | null) => void;
+}
 
 /** The candidates as columns. */
-export function HeaderRow() {
-  const { columns } = useLedger();
+export function HeaderRow({ shown, menu, onMenu }: Props) {
   return (
     <tr>
       <th scope="col" className="ledger-assumption">
         <AssumptionSwitch />
       </th>
-      {columns.map((column) => (
-        <th key={column.id} scope="col" className="ledger-candidate" title={column.name}>
-          <span className="ledger-letter">{column.letter}</span>
-          <span className="aside-text">{column.name}</span>
-          <span className="ledger-candidate-name" aria-hidden="true">
-            {withSoftHyphens(column.short)}
-          </span>
-          {column.mustNotMiss && <span className="ledger-must">must not miss</span>}
-        </th>
+      {shown.map((one) => (
+        <CandidateHeader
+          key={one.column.id}
+          of={one}
+          menuOpen={menu === one.column.id}
+          onMenu={(open) => {
+            onMenu(open ? one.column.id : null);
+          }}
+        />
       ))}
     </tr>
   );

@@ -7,6 +7,7 @@ const keys: [string, string][] = [
   ['Enter', 'opens the row'],
   ['0 to 9', 'begin typing the likelihood of the cell'],
   ['w', 'says how the number of the cell came about'],
+  ['m', 'opens the menu of the column: pin, fold'],
   ['Esc', 'closes the side'],
   ['Up, Down in a field', 'go to the candidate above or below'],
   ['Enter in a field', 'saves the judgement'],

@@ -33,6 +33,16 @@ export function LedgerScreen() {
         {!phone && !empty && (
           <Button
             variant="ghost"
+            onClick={() => {
+              open({ kind: 'columns' });
+            }}
+          >
+            Columns
+          </Button>
+        )}
+        {!phone && !empty && (
+          <Button
+            variant="ghost"
             aria-pressed={compact}
             onClick={() => {
               setCompact(!compact);

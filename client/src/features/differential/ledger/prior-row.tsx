@@ -1,12 +1,13 @@
 import { ShareBar } from '../../../components/marks/share-bar';
-import type { Column } from '../model/columns';
+import type { ShownColumn } from '../columns/arrange';
+import { stuckProps } from '../columns/stuck-props';
 import { priorSentence, priorView } from '../model/prior-view';
 import { useLedger } from './ledger-context';
 import { MovingFigure } from './moving-figure';
 
 /** The first row: what the panel starts from. */
-export function PriorRow() {
-  const { columns, panel, unsaved, differential } = useLedger();
+export function PriorRow({ shown }: { shown: readonly ShownColumn[] }) {
+  const { panel, unsaved, differential } = useLedger();
   const selected = panel?.kind === 'prior' || (panel?.kind === 'why' && panel.target === 'prior');
   return (
     <tr className="ledger-row ledger-row--prior" aria-selected={selected}>
@@ -17,8 +18,8 @@ export function PriorRow() {
           {priorLine(differential)}
         </span>
       </th>
-      {columns.map((column) => (
-        <PriorCell key={column.id} column={column} />
+      {shown.map((one, index) => (
+        <PriorCell key={one.column.id} of={one} place={index + 1} />
       ))}
     </tr>
   );
@@ -30,11 +31,19 @@ function priorLine({ assessment, sealed, mine }: ReturnType<typeof useLedger>['d
   return sealed && mine ? 'Starting shares, yours' : 'Starting shares';
 }
 
-function PriorCell({ column }: { column: Column }) {
+function PriorCell({ of, place }: { of: ShownColumn; place: number }) {
+  const { column, folded } = of;
   const { differential } = useLedger();
   const view = priorView(differential, column.index);
+  const at = { 'data-row': 0, 'data-column': place, tabIndex: -1 };
+  if (folded)
+    return (
+      <td {...at} {...stuckProps(of, 'ledger-cell ledger-folded')}>
+        <span className="aside-text">Folded. {priorSentence(view)}</span>
+      </td>
+    );
   return (
-    <td className="ledger-cell" data-row={0} data-column={column.index + 1} tabIndex={-1}>
+    <td {...at} {...stuckProps(of, 'ledger-cell')}>
       <span className="aside-text">{priorSentence(view)}</span>
       <span className="ledger-figure" aria-hidden="true">
         {view.ownShare && <span className="mark-diamond mark-diamond--inline" />}

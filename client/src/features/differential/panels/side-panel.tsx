@@ -1,4 +1,5 @@
 import { type ReactNode, type RefObject, useLayoutEffect, useRef } from 'react';
+import { ColumnsPanel } from '../columns/columns-panel';
 import { CandidatesPanel } from '../evidence/candidates-panel';
 import { type Panel, useLedger } from '../ledger/ledger-context';
 import { FindingPanel } from './finding-panel';
@@ -61,6 +62,8 @@ function contents(panel: Panel | null): ReactNode {
       return <SealsPanel />;
     case 'candidates':
       return <CandidatesPanel />;
+    case 'columns':
+      return <ColumnsPanel />;
     case 'groups':
       return <GroupsPanel />;
     case 'finding':

@@ -3,12 +3,14 @@ import { Failure } from '../../../components/failure';
 import { SkeletonRows } from '../../../components/skeleton';
 import { useCaseId } from '../../cases/api/get-case';
 import { useDifferential } from '../api/get-differential';
+import { ColumnChoiceProvider } from '../columns/column-choice-context';
 import { DraftsProvider } from '../drafts/drafts-context';
 import { LedgerProvider, type Panel } from '../ledger/ledger-context';
 import { LedgerScreen } from '../ledger/ledger-screen';
 import '../ledger/ledger.css';
 import '../ledger/standing.css';
 import '../ledger/narrow-rows.css';
+import '../columns/columns.css';
 import '../ledger/side.css';
 import '../editor/editor.css';
 import '../cards/cards.css';
@@ -24,7 +26,9 @@ export default function DifferentialRoute() {
     return (
       <DraftsProvider key={caseId} differential={found.data}>
         <LedgerProvider differential={found.data} first={firstPanel(params)}>
-          <LedgerScreen />
+          <ColumnChoiceProvider caseId={caseId}>
+            <LedgerScreen />
+          </ColumnChoiceProvider>
         </LedgerProvider>
       </DraftsProvider>
     );
