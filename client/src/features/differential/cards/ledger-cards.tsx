@@ -63,6 +63,9 @@ function FindingCard({ finding }: { finding: Finding }) {
       <h2 className="ledger-name">{finding.title}</h2>
       <p className="small soft">
         {unsaved.has(finding.id) && <b className="ledger-unsaved">Typed, not saved.</b>}
+        {differential.agenda.some((item) => item.findingId === finding.id) && (
+          <b className="ledger-agenda">Discuss first.</b>
+        )}
         {findingLine(finding, dayWords(format))}
       </p>
       <CellList finding={finding} />

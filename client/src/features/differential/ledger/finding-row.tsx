@@ -17,12 +17,14 @@ interface Props {
   cells: readonly CellView[];
   selected: boolean;
   unsaved: boolean;
+  /** The chair wants it discussed first. */
+  onAgenda: boolean;
   why: ((panel: Panel) => void) | null;
 }
 
 /** One finding across the candidates. Drawn anew only where something of this row changed. */
 export const FindingRow = memo(function FindingRow(props: Props) {
-  const { finding, row, shown, cells, selected, unsaved, why } = props;
+  const { finding, row, shown, cells, selected, unsaved, onAgenda, why } = props;
   const format = useFormat();
   const state = finding.enteredInError ? 'error' : finding.observed === null ? 'pending' : 'observed';
   return (
@@ -31,6 +33,7 @@ export const FindingRow = memo(function FindingRow(props: Props) {
         <span className="ledger-name">{finding.title}</span>
         <span className="ledger-line">
           {unsaved && <b className="ledger-unsaved">Typed, not saved.</b>}
+          {onAgenda && <b className="ledger-agenda">Discuss first.</b>}
           {findingLine(finding, dayWords(format))}
         </span>
       </th>

@@ -11,6 +11,7 @@ export function FindingRows({ shown }: { shown: readonly ShownColumn[] }) {
   const [cellsOf] = useState(keepingRowCells);
   const cells = cellsOf(differential, rows, columns.length);
   const placeOf = new Map(rows.map((finding, index) => [finding.id, index + 1]));
+  const agenda = new Set(differential.agenda.map((item) => item.findingId));
   const selected = panel?.kind === 'row' ? panel.findingId : panel?.kind === 'why' ? panel.target : null;
   return rowGroups(differential.findings).map((group) => (
     <tbody key={group.title}>
@@ -28,6 +29,7 @@ export function FindingRows({ shown }: { shown: readonly ShownColumn[] }) {
           cells={cells.get(finding.id) ?? []}
           selected={selected === finding.id}
           unsaved={unsaved.has(finding.id)}
+          onAgenda={agenda.has(finding.id)}
           why={differential.assessment ? open : null}
         />
       ))}

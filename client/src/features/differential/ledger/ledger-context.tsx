@@ -18,7 +18,18 @@ export type Panel =
   /** The target is a finding's id, `prior` or `standing`. */
   | { kind: 'why'; target: string; column: number }
   | { kind: 'finding'; findingId: string | null }
-  | { kind: 'pooled' | 'round' | 'seals' | 'candidates' | 'groups' | 'assumption' | 'sets' | 'columns' };
+  | {
+      kind:
+        | 'pooled'
+        | 'round'
+        | 'seals'
+        | 'candidates'
+        | 'groups'
+        | 'assumption'
+        | 'sets'
+        | 'columns'
+        | 'discuss';
+    };
 
 export interface Ledger {
   /** As it is read on this screen: its assessment and everything beside it belong to the reading in force. */

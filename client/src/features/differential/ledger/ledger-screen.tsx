@@ -30,6 +30,16 @@ export function LedgerScreen() {
   return (
     <section className="ledger-section" aria-label="Differential">
       <RoundBar>
+        {!empty && (
+          <Button
+            variant="ghost"
+            onClick={() => {
+              open({ kind: 'discuss' });
+            }}
+          >
+            Discuss first
+          </Button>
+        )}
         {!phone && !empty && (
           <Button
             variant="ghost"

@@ -2,6 +2,7 @@ import { Button } from '@radix-ui/themes';
 import type { Finding } from '@weighhouse/shared/contracts/findings';
 import { Link } from 'react-router-dom';
 import { useFormat } from '../../../lib/use-format';
+import { OnAgenda } from '../discuss/on-agenda';
 import { ApartNote } from '../editor/apart-note';
 import { RowEditor } from '../editor/row-editor';
 import { EnteredInErrorButton } from '../evidence/entered-in-error-button';
@@ -26,6 +27,7 @@ export function RowPanel({ findingId }: { findingId: string }) {
     <>
       <SideHeading>{finding.title}</SideHeading>
       <About finding={finding} />
+      <OnAgenda finding={finding} />
       {canJudge && !finding.enteredInError ? <RowEditor finding={finding} /> : <CellList finding={finding} />}
       {!canJudge && differential.sealed && differential.mine?.handedInAt && (
         <p className="note">

@@ -1,5 +1,6 @@
 import { type ReactNode, type RefObject, useLayoutEffect, useRef } from 'react';
 import { ColumnsPanel } from '../columns/columns-panel';
+import { DiscussPanel } from '../discuss/discuss-panel';
 import { CandidatesPanel } from '../evidence/candidates-panel';
 import { type Panel, useLedger } from '../ledger/ledger-context';
 import { FindingPanel } from './finding-panel';
@@ -62,6 +63,8 @@ function contents(panel: Panel | null): ReactNode {
       return <SealsPanel />;
     case 'candidates':
       return <CandidatesPanel />;
+    case 'discuss':
+      return <DiscussPanel />;
     case 'columns':
       return <ColumnsPanel />;
     case 'groups':
