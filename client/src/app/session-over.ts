@@ -1,6 +1,7 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useEffect, useState } from 'react';
 import { meQuery } from '../features/people/api/get-me';
+import { useLiveState } from '../lib/live';
 import { onSessionOver } from '../lib/session';
 
 /**
@@ -16,6 +17,11 @@ export function useSessionOver(): boolean {
       }),
     [],
   );
+  const live = useLiveState();
+  useEffect(() => {
+    // The server closes the connection of a session that has ended: ask, so that the page says so at once.
+    if (live === 'reconnecting') void client.invalidateQueries({ queryKey: meQuery.queryKey });
+  }, [client, live]);
   useEffect(
     () =>
       client.getQueryCache().subscribe((event) => {

@@ -3,6 +3,9 @@ import type { Socket } from 'socket.io-client';
 /** Whether live changes arrive. Before the first connection has failed it counts as connected. */
 export type LiveState = 'connected' | 'reconnecting';
 
+/** Milliseconds before a server that refused the connection is asked again. */
+const refusedPause = 10_000;
+
 type Handler = (payload: unknown) => void;
 
 /**
@@ -48,6 +51,11 @@ class LiveConnection {
     };
   }
 
+  /** Tries at once where the connection is down: after signing in again, or when the network is back. */
+  connectAgain(): void {
+    if (this.#socket?.connected === false) this.#socket.connect();
+  }
+
   /** Signing out ends the connection: the next person opens their own. */
   close(): void {
     this.#socket?.disconnect();
@@ -72,12 +80,13 @@ class LiveConnection {
         this.#setState('connected');
         for (const handler of this.#connectHandlers) handler();
       });
-      socket.on('disconnect', () => {
+      const lost = () => {
         this.#setState('reconnecting');
-      });
-      socket.on('connect_error', () => {
-        this.#setState('reconnecting');
-      });
+        // The library gives up for good on a server that closed or refused; a session that ended may be begun again.
+        if (!socket.active) setTimeout(() => this.#socket === socket && this.connectAgain(), refusedPause);
+      };
+      socket.on('disconnect', lost);
+      socket.on('connect_error', lost);
       socket.onAny((event: string, payload: unknown) => {
         for (const handler of this.#handlers.get(event) ?? []) handler(payload);
       });
@@ -100,7 +109,7 @@ class LiveConnection {
     this.#lastBeat = Date.now();
     setInterval(beat, 5_000);
     window.addEventListener('online', () => {
-      if (this.#socket?.connected === false) this.#socket.connect();
+      this.connectAgain();
     });
   }
 

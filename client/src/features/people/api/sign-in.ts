@@ -1,6 +1,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { meSchema, type SignIn } from '@weighhouse/shared/contracts/people';
 import { request } from '../../../lib/api';
+import { liveConnection } from '../../../lib/live-connection';
 import { decideSession } from '../../../lib/session';
 import { meQuery } from './get-me';
 import { leaveNothing } from './leave-nothing';
@@ -18,6 +19,7 @@ export function useSignIn() {
       if (!same) leaveNothing(client);
       client.setQueryData(meQuery.queryKey, me);
       decideSession(same);
+      liveConnection.connectAgain();
     },
   });
 }

@@ -12,7 +12,9 @@ export function SignInForm({ email: known = '' }: { email?: string }) {
   const [email, setEmail] = useState(known);
   const [password, setPassword] = useState('');
   const signIn = useSignIn();
-  const throttled = isApiError(signIn.error, 'too-many') ? signIn.error : null;
+  // The wait is for the address that was tried; a mended one need not wait with it.
+  const sameAddress = signIn.variables?.email === email;
+  const throttled = isApiError(signIn.error, 'too-many') && sameAddress ? signIn.error : null;
   const wait = useCountdown(throttled ? (throttled.retryAfterSeconds ?? 60) : 0, signIn.submittedAt);
 
   const submit = (event: SubmitEvent) => {
@@ -62,9 +64,9 @@ export function SignInForm({ email: known = '' }: { email?: string }) {
           Too many tries. You can try again in {waitWords(wait)}.
         </p>
       )}
-      {signIn.error && !throttled && !isApiError(signIn.error, 'wrong-credentials') && (
-        <FailureLine error={signIn.error} />
-      )}
+      {signIn.error &&
+        !isApiError(signIn.error, 'too-many') &&
+        !isApiError(signIn.error, 'wrong-credentials') && <FailureLine error={signIn.error} />}
       <Button size="3" type="submit" loading={signIn.isPending} disabled={wait > 0}>
         Sign in
       </Button>

@@ -26,7 +26,8 @@ describe('fileFault', () => {
 describe('uploadFault', () => {
   it('speaks by the id of the refusal', () => {
     const refusal = (id: string) => new ApiError(id, 'raw', { status: 400 });
-    expect(uploadFault(refusal('wrong-type'), 5).fault).toContain('by its content');
+    // The server says what the content is and what to do.
+    expect(uploadFault(refusal('wrong-type'), 5).fault).toBe('raw');
     expect(uploadFault(refusal('too-large'), 30 * 1024 * 1024).fault).toContain('30.0 MB');
     expect(uploadFault(refusal('offline'), 5).fault).toContain('offline');
   });

@@ -36,7 +36,6 @@ export function fileFault({ name, type, size }: Named): string | null {
 /** Why an upload failed, with the way out, and whether sending the same file again can help. */
 export function uploadFault(error: unknown, size: number): { fault: string; retry: boolean } {
   if (isApiError(error, 'too-large')) return { fault: tooLarge(size), retry: false };
-  if (isApiError(error, 'wrong-type')) return { fault: wrongType, retry: false };
   if (isApiError(error, 'offline'))
     return { fault: 'Not sent: offline or the server cannot be reached. Try again.', retry: true };
   return { fault: errorLine(error), retry: errorWords(error).retry };
