@@ -11,6 +11,8 @@ interface StandingPostProps {
   ticks: readonly number[];
   /** Where oneself stands alone. */
   own: number | null;
+  /** Where it would stand without what somebody points at. */
+  without?: number | null;
   none: boolean;
   sealed: boolean;
 }
@@ -18,7 +20,16 @@ interface StandingPostProps {
 const at = (share: number) => ({ bottom: `${String(barPlace(share))}%` });
 
 /** Where the panel stands on one candidate, drawn upright; the text below it says the same in words. */
-export function StandingPost({ share, range, before, ticks, own, none, sealed }: StandingPostProps) {
+export function StandingPost({
+  share,
+  range,
+  before,
+  ticks,
+  own,
+  without = null,
+  none,
+  sealed,
+}: StandingPostProps) {
   return (
     <span className="mark-post" data-sealed={sealed || undefined} aria-hidden="true">
       {sealed && <span className="mark-post-word">sealed</span>}
@@ -30,6 +41,7 @@ export function StandingPost({ share, range, before, ticks, own, none, sealed }:
         />
       )}
       {before !== null && <span className="mark-before" style={at(before)} />}
+      {without !== null && <span className="mark-without" style={at(without)} />}
       {range && (
         <span
           className="mark-range"

@@ -1,16 +1,19 @@
 import { naturalFrequency } from '@weighhouse/shared/reasoning/natural-frequency';
 import { useState } from 'react';
 import { ShareBar } from '../../../components/marks/share-bar';
+import { CombinationsButton } from '../coexistence/combinations-button';
 import { useLedger } from '../ledger/ledger-context';
 import { MovingFigure } from '../ledger/moving-figure';
 import { type Column, columnLabel } from '../model/columns';
 import { leadingColumns } from '../model/leading-columns';
+import { useWithout } from '../without/without-context';
 import { standingSentence, standingView } from '../model/standing-view';
 
 /** Where the panel stands, at the bottom of a phone: the leading candidates, and all of them on demand. */
 export function CompactStanding() {
   const { differential, columns } = useLedger();
   const [all, setAll] = useState(false);
+  const without = useWithout();
   const standing = differential.assessment?.standing ?? differential.mine?.standing ?? null;
   const shown = all ? columns : leadingColumns(columns, standing, 3);
   const sealed = differential.sealed && !differential.assessment;
@@ -31,6 +34,12 @@ export function CompactStanding() {
       </div>
       {sealed && <p className="small soft">Sealed until the chair unseals the round.</p>}
       {!sealed && !differential.assessment && <p className="small soft">Nothing judged yet.</p>}
+      {without && (
+        <p className="small">
+          <b>{without.sentence}</b>
+        </p>
+      )}
+      <CombinationsButton />
       <ul>
         {shown.map((column) => (
           <Line key={column.id} column={column} />
@@ -43,6 +52,7 @@ export function CompactStanding() {
 function Line({ column }: { column: Column }) {
   const { differential, open } = useLedger();
   const view = standingView(differential, column.index);
+  const without = useWithout()?.standing?.[column.index] ?? null;
   return (
     <li>
       {view.share === null ? (
@@ -65,7 +75,8 @@ function Line({ column }: { column: Column }) {
         <ShareBar share={view.share} ticks={view.ticks} own={view.own} none={column.none} />
       )}
       <span className="compact-share figures">
-        {view.share !== null && <MovingFigure share={view.share} percent />}
+        {view.share !== null && without === null && <MovingFigure share={view.share} percent />}
+        {without !== null && `${String(naturalFrequency(without).outOf100)} without`}
         {view.share === null && view.own !== null && `you ${naturalFrequency(view.own).percent}`}
       </span>
       <span className="aside-text">

@@ -10,6 +10,7 @@ import { dayWords } from '../model/day-words';
 import { findingLine } from '../model/finding-words';
 import { priorSentence, priorView } from '../model/prior-view';
 import { rowGroups } from '../model/rows';
+import { WithoutButton } from '../without/without-button';
 import { CellList } from '../panels/cell-list';
 import { CompactStanding } from './compact-standing';
 
@@ -69,6 +70,7 @@ function FindingCard({ finding }: { finding: Finding }) {
         {findingLine(finding, dayWords(format))}
       </p>
       <CellList finding={finding} />
+      <WithoutButton left={{ kind: 'finding', id: finding.id }} name={`“${finding.title}”`} />
       <Button
         variant={canJudge && !struck ? 'solid' : 'outline'}
         onClick={() => {

@@ -5,6 +5,7 @@ import type { ShownColumn } from '../columns/arrange';
 import type { CellView } from '../model/cells';
 import { dayWords } from '../model/day-words';
 import { findingLine } from '../model/finding-words';
+import { leftOutAttribute } from '../without/left-out';
 import { FindingCell } from './finding-cell';
 import type { Panel } from './ledger-context';
 
@@ -29,7 +30,14 @@ export const FindingRow = memo(function FindingRow(props: Props) {
   const state = finding.enteredInError ? 'error' : finding.observed === null ? 'pending' : 'observed';
   return (
     <tr className="ledger-row" data-state={state} aria-selected={selected}>
-      <th scope="row" className="ledger-title" data-row={row} data-column={0} tabIndex={-1}>
+      <th
+        scope="row"
+        className="ledger-title"
+        data-row={row}
+        data-column={0}
+        data-without={leftOutAttribute({ kind: 'finding', id: finding.id })}
+        tabIndex={-1}
+      >
         <span className="ledger-name">{finding.title}</span>
         <span className="ledger-line">
           {unsaved && <b className="ledger-unsaved">Typed, not saved.</b>}

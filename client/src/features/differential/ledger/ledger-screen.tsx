@@ -5,9 +5,13 @@ import { MarksKey } from '../../../components/marks/marks-key';
 import { LedgerCards } from '../cards/ledger-cards';
 import { SidePanel } from '../panels/side-panel';
 import { PriorFirst } from '../prior-first/prior-first';
+import { AssumptionSwitch } from '../reading/assumption-switch';
 import { ReadingBand } from '../reading/reading-band';
 import { RoundBar } from '../rounds/round-bar';
 import { useSeenDigests } from '../seals/use-seen-digests';
+import { usePointing } from '../without/use-pointing';
+import { WithoutStatus } from '../without/without-status';
+import '../without/without.css';
 import { EmptyLedger } from './empty-ledger';
 import { useLedger } from './ledger-context';
 import { LedgerTable } from './ledger-table';
@@ -22,13 +26,14 @@ export function LedgerScreen() {
   const phone = usePhone();
   const [compact, setCompact] = useCompact();
   const main = useRef<HTMLDivElement>(null);
+  const pointing = usePointing();
   useSeenDigests(differential.round);
 
   // The prior comes before the rows, so that the findings are not counted twice.
   if (canJudge && saved.mine?.prior === null) return <PriorFirst />;
   const empty = columns.length === 1 && rows.length === 0;
   return (
-    <section className="ledger-section" aria-label="Differential">
+    <section className="ledger-section" aria-label="Differential" {...pointing}>
       <RoundBar>
         {!empty && (
           <Button
@@ -66,7 +71,18 @@ export function LedgerScreen() {
       <PriorAgain />
       <div className="ledger-work">
         <div ref={main} className="ledger-main">
-          {empty ? <EmptyLedger /> : phone ? <LedgerCards /> : <LedgerTable compact={compact} />}
+          {empty ? (
+            <EmptyLedger />
+          ) : phone ? (
+            <>
+              <div className="cards-assumption">
+                <AssumptionSwitch />
+              </div>
+              <LedgerCards />
+            </>
+          ) : (
+            <LedgerTable compact={compact} />
+          )}
           <div className="ledger-foot">
             {!empty && (
               <MarksKey
@@ -116,6 +132,7 @@ export function LedgerScreen() {
         />
       </div>
       <StandingAnnouncements />
+      <WithoutStatus />
     </section>
   );
 }

@@ -3,7 +3,9 @@ import { StandingPost } from '../../../components/marks/standing-post';
 import type { ShownColumn } from '../columns/arrange';
 import { stuckProps } from '../columns/stuck-props';
 import { standingLines, standingSentence, standingView } from '../model/standing-view';
+import { CombinationsButton } from '../coexistence/combinations-button';
 import { useLeaderRange } from '../why-sum/use-leader-range';
+import { useWithout } from '../without/without-context';
 import { useLedger } from './ledger-context';
 import { MovingFigure } from './moving-figure';
 
@@ -11,16 +13,24 @@ import { MovingFigure } from './moving-figure';
 export function StandingRow({ row, shown }: { row: number; shown: readonly ShownColumn[] }) {
   const { differential, panel } = useLedger();
   const range = useLeaderRange();
+  const without = useWithout();
   return (
     <tr className="ledger-standing" aria-selected={panel?.kind === 'why' && panel.target === 'standing'}>
       <th scope="row" className="ledger-title" data-row={row} data-column={0} tabIndex={-1}>
         <span className="ledger-name">Where the panel stands</span>
-        {standingLines(differential).map((line) => (
-          <span key={line} className="ledger-line">
-            {line}
+        {without ? (
+          <span className="ledger-line" data-without-said>
+            {without.sentence} The dashed line is the standing without it.
           </span>
-        ))}
-        {range !== null && <span className="ledger-line">{range}</span>}
+        ) : (
+          standingLines(differential).map((line) => (
+            <span key={line} className="ledger-line">
+              {line}
+            </span>
+          ))
+        )}
+        {range !== null && !without && <span className="ledger-line">{range}</span>}
+        {!without && <CombinationsButton />}
       </th>
       {shown.map((one, index) => (
         <StandingCell key={one.column.id} of={one} row={row} place={index + 1} />
@@ -33,6 +43,7 @@ function StandingCell({ of, row, place }: { of: ShownColumn; row: number; place:
   const { column, folded } = of;
   const { differential } = useLedger();
   const view = standingView(differential, column.index);
+  const without = useWithout()?.standing?.[column.index] ?? null;
   const at = { 'data-row': row, 'data-column': place, tabIndex: -1 };
   if (folded)
     return (
@@ -43,7 +54,7 @@ function StandingCell({ of, row, place }: { of: ShownColumn; row: number; place:
     );
   return (
     <td {...at} {...stuckProps(of, 'ledger-cell')}>
-      <StandingPost {...view} none={column.none} />
+      <StandingPost {...view} without={without} none={column.none} />
       {view.share !== null && (
         <span
           className="standing-big figures"
@@ -53,7 +64,10 @@ function StandingCell({ of, row, place }: { of: ShownColumn; row: number; place:
         </span>
       )}
       <span className="standing-like">
-        {view.share !== null && `${naturalFrequency(view.share).words} like this`}
+        {view.share !== null &&
+          (without === null
+            ? `${naturalFrequency(view.share).words} like this`
+            : `${naturalFrequency(without).words} without`)}
         {view.share === null && view.own !== null && `you: ${naturalFrequency(view.own).words}`}
       </span>
       <span className="aside-text">{standingSentence(view)}</span>

@@ -2,6 +2,7 @@ import { Button } from '@radix-ui/themes';
 import { useFormat } from '../../../lib/use-format';
 import { useLedger } from '../ledger/ledger-context';
 import { roundTitle } from '../model/round-words';
+import { WithoutPerson } from '../without/without-person';
 import { LeftToJudge } from './left-to-judge';
 import { SideHeading } from './side-panel';
 
@@ -45,6 +46,7 @@ export function RoundPanel() {
             <span className="small soft">
               {handedInAt === null ? 'not handed in' : `handed in ${format.moment(handedInAt)}`}
             </span>
+            <WithoutPerson personId={person.id} name={person.name} />
             {digest !== null && <Digest digest={digest} />}
           </li>
         ))}

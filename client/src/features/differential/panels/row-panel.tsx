@@ -9,6 +9,7 @@ import { EnteredInErrorButton } from '../evidence/entered-in-error-button';
 import { useLedger } from '../ledger/ledger-context';
 import { dayWords } from '../model/day-words';
 import { effortWords, reliabilityWord, sourceWords, stateWords } from '../model/finding-words';
+import { WithoutButton } from '../without/without-button';
 import { CellList } from './cell-list';
 import { SideHeading } from './side-panel';
 
@@ -35,6 +36,7 @@ export function RowPanel({ findingId }: { findingId: string }) {
         </p>
       )}
       <ApartNote finding={finding} />
+      <WithoutButton left={{ kind: 'finding', id: finding.id }} name={`“${finding.title}”`} />
       <div className="actions side-actions">
         <Button variant="outline" disabled={index === 0} onClick={step(-1)}>
           Row before

@@ -1,6 +1,8 @@
 import { type ReactNode, type RefObject, useLayoutEffect, useRef } from 'react';
 import { ColumnsPanel } from '../columns/columns-panel';
 import { DiscussPanel } from '../discuss/discuss-panel';
+import { AssumptionPanel } from '../coexistence/assumption-panel';
+import { SetsPanel } from '../coexistence/sets-panel';
 import { CandidatesPanel } from '../evidence/candidates-panel';
 import { type Panel, useLedger } from '../ledger/ledger-context';
 import { FindingPanel } from './finding-panel';
@@ -67,6 +69,10 @@ function contents(panel: Panel | null): ReactNode {
       return <DiscussPanel />;
     case 'columns':
       return <ColumnsPanel />;
+    case 'assumption':
+      return <AssumptionPanel />;
+    case 'sets':
+      return <SetsPanel />;
     case 'groups':
       return <GroupsPanel />;
     case 'finding':

@@ -7,8 +7,10 @@ import { ColumnChoiceProvider } from '../columns/column-choice-context';
 import { DraftsProvider } from '../drafts/drafts-context';
 import { LedgerProvider, type Panel } from '../ledger/ledger-context';
 import { LedgerScreen } from '../ledger/ledger-screen';
+import { WithoutProvider } from '../without/without-context';
 import '../ledger/ledger.css';
 import '../ledger/standing.css';
+import '../coexistence/coexistence.css';
 import '../ledger/narrow-rows.css';
 import '../columns/columns.css';
 import '../ledger/side.css';
@@ -29,6 +31,9 @@ export default function DifferentialRoute() {
           <ColumnChoiceProvider caseId={caseId}>
             <LedgerScreen />
           </ColumnChoiceProvider>
+          <WithoutProvider>
+            <LedgerScreen />
+          </WithoutProvider>
         </LedgerProvider>
       </DraftsProvider>
     );
