@@ -29,11 +29,10 @@ export default function DifferentialRoute() {
       <DraftsProvider key={caseId} differential={found.data}>
         <LedgerProvider differential={found.data} first={firstPanel(params)}>
           <ColumnChoiceProvider caseId={caseId}>
-            <LedgerScreen />
+            <WithoutProvider>
+              <LedgerScreen />
+            </WithoutProvider>
           </ColumnChoiceProvider>
-          <WithoutProvider>
-            <LedgerScreen />
-          </WithoutProvider>
         </LedgerProvider>
       </DraftsProvider>
     );
