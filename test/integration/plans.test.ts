@@ -409,15 +409,6 @@ describe('an action', () => {
     expect(after?.actions[1]).toEqual(second);
   });
 
-  it('refuses many who do not own it at once, and the service answers on', async () => {
-    const case_ = await concludedCase(running);
-    const [plan] = (await readPlan(case_, case_.chair)).signed;
-    const id = plan!.actions[0]!.id;
-    const answers = await Promise.all(Array.from({ length: 40 }, () => done(case_.chair, id)));
-    expect(answers.map(({ status }) => status)).toEqual(answers.map(() => 403));
-    await case_.chair.agent.get(`/api/cases/${case_.id}`).expect(200);
-  });
-
   it('of a draft cannot be done yet', async () => {
     const case_ = await askedCase(running);
     const { draft } = await readPlan(case_, case_.chair);
