@@ -7,6 +7,8 @@ import { TooMany } from '../platform/errors/refusal.js';
 export const attemptsAMinute = {
   /** Signing in with one e-mail from one address, since it last succeeded. */
   account: 10,
+  /** Signing in with one e-mail from anywhere, since it last succeeded: guesses may come from many addresses. */
+  anywhere: 60,
   /** Signing in from one address, with any e-mail. */
   address: 120,
   /** Giving one's password again, since it was last right. */
@@ -18,8 +20,8 @@ const minuteMs = 60_000;
 /** Counts attempts at passwords. */
 @Injectable()
 export class AttemptLimits {
-  /** How often each count was started anew; part of the key, because the storage cannot forget. */
-  private readonly fresh = new Map<string, number>();
+  /** How often each count was started anew, and when last; part of the key, because the storage cannot forget. */
+  private readonly fresh = new Map<string, { times: number; at: number }>();
 
   constructor(@InjectThrottlerStorage() private readonly storage: ThrottlerStorage) {}
 
@@ -30,7 +32,7 @@ export class AttemptLimits {
   async take(kind: keyof typeof attemptsAMinute, of: string): Promise<void> {
     const key = keyOf(kind, of);
     const { isBlocked, timeToBlockExpire } = await this.storage.increment(
-      `${key} ${String(this.fresh.get(key) ?? 0)}`,
+      `${key} ${String(this.fresh.get(key)?.times ?? 0)}`,
       minuteMs,
       attemptsAMinute[kind],
       minuteMs,
@@ -40,9 +42,22 @@ export class AttemptLimits {
   }
 
   /** Starts the count anew, after the right password. */
-  succeeded(kind: 'account' | 'confirmation', of: string): void {
+  succeeded(kind: 'account' | 'anywhere' | 'confirmation', of: string): void {
     const key = keyOf(kind, of);
-    this.fresh.set(key, (this.fresh.get(key) ?? 0) + 1);
+    const now = Date.now();
+    const times = (this.fresh.get(key)?.times ?? 0) + 1;
+    // Moved to the end, so that the oldest stand first.
+    this.fresh.delete(key);
+    this.fresh.set(key, { times, at: now });
+    this.forgetOld(now);
+  }
+
+  /** What was counted before an old start is over by itself. */
+  private forgetOld(now: number): void {
+    for (const [key, { at }] of this.fresh) {
+      if (now - at < 2 * minuteMs) return;
+      this.fresh.delete(key);
+    }
   }
 }
 

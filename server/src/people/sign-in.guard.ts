@@ -7,6 +7,7 @@ import { AuditLog } from '../platform/audit-log/audit-log.js';
 import { invalid, Refusal } from '../platform/errors/refusal.js';
 import { fieldPath } from '../platform/http/validation.js';
 import { AttemptLimits } from './attempt-limits.js';
+import { networkOf } from './network-of.js';
 import type { PersonRow } from './person.entity.js';
 
 /** The person that a password let in, on the request. */
@@ -27,7 +28,7 @@ export class SignInGuard extends AuthGuard('password') {
 
   override async canActivate(context: ExecutionContext): Promise<boolean> {
     const request = context.switchToHttp().getRequest<Request>();
-    const address = request.ip ?? '';
+    const address = networkOf(request.ip ?? '');
     await this.limits.take('address', address);
     // Guards run before the validation of the body, and the strategy takes what it finds.
     const input = signInSchema.safeParse(request.body);
@@ -38,6 +39,7 @@ export class SignInGuard extends AuthGuard('password') {
     }
     const account = `${address} ${input.data.email}`;
     await this.limits.take('account', account);
+    await this.limits.take('anywhere', input.data.email);
     request.body = input.data;
     try {
       await super.canActivate(context);
@@ -46,6 +48,7 @@ export class SignInGuard extends AuthGuard('password') {
       throw error;
     }
     this.limits.succeeded('account', account);
+    this.limits.succeeded('anywhere', input.data.email);
     return true;
   }
 
