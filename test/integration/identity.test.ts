@@ -53,6 +53,8 @@ describe('the identity card', () => {
     const admin = await seat(running, ['administrator', 'chair', 'liaison', 'referrer']);
     const other = await acceptedCase(running, { contributors: 2, ownPeople: true });
     const before = await openings(case_);
+    const refusals = () =>
+      running.source.manager.findBy(AuditEntry, { caseId: case_.id, action: 'identity.refused' });
     for (const person of [case_.chair, ...case_.contributors]) {
       await person.agent.get(path()).expect(403);
       await person.agent
@@ -68,6 +70,11 @@ describe('the identity card', () => {
         .expect(404);
     }
     expect(await openings(case_)).toHaveLength(before.length);
+    // That somebody of the case asked stands in the trail, once an hour however often they ask.
+    await case_.chair.agent.get(path()).expect(403);
+    expect((await refusals()).map(({ actorId }) => actorId)).toEqual(
+      [case_.chair, ...case_.contributors].map(({ id }) => id),
+    );
   });
 
   it('is unreadable in the database, and does not open when it is moved to another case', async () => {

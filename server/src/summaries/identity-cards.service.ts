@@ -1,14 +1,17 @@
 import { Injectable } from '@nestjs/common';
 import type { Identity, IdentityInput } from '@weighhouse/shared/contracts/summaries';
-import type { EntityManager } from 'typeorm';
+import { type EntityManager, MoreThan } from 'typeorm';
 import { CaseAccess, type OpenedCase } from '../cases/case-access.js';
 import { CaseChanges } from '../cases/case-changes.js';
+import { AuditEntry } from '../platform/audit-log/audit-entry.entity.js';
 import { AuditLog } from '../platform/audit-log/audit-log.js';
 import { Clock } from '../platform/clock/clock.js';
 import { UnitOfWork } from '../platform/database/unit-of-work.js';
-import { invalid, stale } from '../platform/errors/refusal.js';
+import { invalid, Refusal, stale } from '../platform/errors/refusal.js';
 import type { Actor } from '../platform/http/actor.js';
 import { IdentityBoxes } from './identity-boxes.js';
+
+const hourMs = 3_600_000;
 
 /** Who the patient is, for the case's referrer and liaison alone. Every opening is in the trail. */
 @Injectable()
@@ -22,11 +25,17 @@ export class IdentityCardsService {
     private readonly clock: Clock,
   ) {}
 
+  /** Somebody of the case whom it is closed to is refused, and that they asked is in the trail. */
   async read(actor: Actor, caseId: string): Promise<Identity> {
-    return this.work.run(async ({ em }) => {
-      const opened = await this.access.open(actor, caseId, 'identity.read', em);
-      return this.openCard(em, actor, opened);
-    });
+    try {
+      return await this.work.run(async ({ em }) => {
+        const opened = await this.access.open(actor, caseId, 'identity.read', em);
+        return this.openCard(em, actor, opened);
+      });
+    } catch (error) {
+      if (error instanceof Refusal && error.id === 'forbidden') await this.recordRefusal(actor, caseId);
+      throw error;
+    }
   }
 
   /** @throws Refusal stale with the card as it stands, which is an opening too; invalid */
@@ -59,6 +68,16 @@ export class IdentityCardsService {
       });
     }
     return { version: known?.version ?? 0, card: known?.card ?? null, abilities: abilitiesOf(opened) };
+  }
+
+  /** Once an hour, so that nobody fills the trail by asking on. */
+  private async recordRefusal(actor: Actor, caseId: string): Promise<void> {
+    const line = { caseId, actorId: actor.id, action: 'identity.refused' };
+    const since = new Date(this.clock.now().getTime() - hourMs);
+    await this.work.run(async ({ em }) => {
+      if (await em.existsBy(AuditEntry, { ...line, at: MoreThan(since) })) return;
+      await this.audit.record(em, { ...line, sentence: 'asked for the identity card and was refused' });
+    });
   }
 
   private checkBirthDate(birthDate: string): void {
