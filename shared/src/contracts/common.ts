@@ -29,10 +29,16 @@ export const optionalWordsSchema = z
   .max(4000, 'must have at most 4,000 characters')
   .optional();
 
-/** One line of text. */
+/** Line breaks and other controls (Unicode Cc, Zl, Zp), which have no place in one line. */
+const controls = /[\p{Cc}\p{Zl}\p{Zp}]+/gu;
+/** Marks that turn the direction of what follows: "not present" could be made to read otherwise than it is kept. */
+const turns = /[\u202a-\u202e\u2066-\u2069]/gu;
+
+/** One line of text. Breaks and controls become a space, and what turns the direction of letters is left out. */
 export const lineSchema = (most: number) =>
   z
     .string({ error: 'must be text' })
+    .overwrite((text) => text.replace(controls, ' ').replace(turns, ''))
     .trim()
     .min(1, 'must not be empty')
     .max(most, `must have at most ${String(most)} characters`);

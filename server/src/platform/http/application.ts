@@ -35,6 +35,8 @@ export function configureApplication(app: NestExpressApplication): void {
 
 function securityHeaders(configuration: Configuration): Parameters<typeof helmet>[0] {
   const https = configuration.PUBLIC_URL.startsWith('https:');
+  // Browsers that read 'self' narrowly do not take it for the address of our own live changes.
+  const live = new URL(configuration.PUBLIC_URL).origin.replace(/^http/, 'ws');
   return {
     strictTransportSecurity: https,
     referrerPolicy: { policy: 'same-origin' },
@@ -45,7 +47,8 @@ function securityHeaders(configuration: Configuration): Parameters<typeof helmet
         styleSrc: ["'self'", "'unsafe-inline'"],
         imgSrc: ["'self'", 'data:', 'blob:'],
         workerSrc: ["'self'", 'blob:'],
-        connectSrc: ["'self'", 'ws:', 'wss:'],
+        connectSrc: ["'self'", live],
+        fontSrc: ["'self'"],
         frameAncestors: ["'none'"],
         upgradeInsecureRequests: https ? [] : null,
       },
