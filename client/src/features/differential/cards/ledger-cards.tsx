@@ -13,6 +13,7 @@ import { rowGroups } from '../model/rows';
 import { WithoutButton } from '../without/without-button';
 import { CellList } from '../panels/cell-list';
 import { CompactStanding } from './compact-standing';
+import { useFewColumns } from './use-few-columns';
 
 /** The ledger on a phone: the prior, then one finding a screen, and where the panel stands always below. */
 export function LedgerCards() {
@@ -84,12 +85,13 @@ function FindingCard({ finding }: { finding: Finding }) {
 }
 
 function PriorCard() {
-  const { differential, columns, canJudge, open } = useLedger();
+  const { differential, canJudge, open } = useLedger();
+  const { shown, more } = useFewColumns();
   return (
     <article className="card">
       <h2 className="ledger-name">Before any finding</h2>
       <ul className="cell-list">
-        {columns.map((column) => {
+        {shown.map((column) => {
           const view = priorView(differential, column.index);
           return (
             <li key={column.id}>
@@ -113,6 +115,7 @@ function PriorCard() {
           );
         })}
       </ul>
+      {more}
       {canJudge && (
         <Button
           variant="outline"

@@ -6,7 +6,7 @@ import type { DiscussRow } from './discuss-rows';
 
 const number = (share: number) => String(naturalFrequency(share).outOf100);
 
-/** "Dr A 8, Dr B 35 of 100 would show this, on C Endocarditis." */
+/** "Dr A: 8, Dr B: 35 of 100 would show this, on C Endocarditis." */
 export function apartSentence({ finding, apart }: DiscussRow, columns: readonly Column[]): string | null {
   const column = apart && columns[apart.column];
   if (!apart || !column) return null;
@@ -15,7 +15,7 @@ export function apartSentence({ finding, apart }: DiscussRow, columns: readonly 
   const level = finding.observed ?? (isTwoLevel(finding) ? 1 : null);
   // The gap of two levels is told in how many would show it, whatever was observed.
   const shown = level === null ? '' : ` ${shownWords(finding, isTwoLevel(finding) ? 1 : level)}`;
-  return `${apart.low.name} ${number(apart.low.p)}, ${apart.high.name} ${number(apart.high.p)} of 100${shown}, on ${columnLabel(column)}.`;
+  return `${apart.low.name}: ${number(apart.low.p)}, ${apart.high.name}: ${number(apart.high.p)} of 100${shown}, on ${columnLabel(column)}.`;
 }
 
 /** What hangs on it: "Taking one person’s numbers moves A Still’s disease by up to 9 of 100." */

@@ -84,9 +84,9 @@ describe('the words of a row', () => {
   const leader = columns[0];
   it('say who is how far apart, on what', () => {
     expect(cultures && apartSentence(cultures, columns)).toBe(
-      'Contributor 2 8, You 35 of 100 would show this, on B Endocarditis.',
+      'Contributor 2: 8, You: 35 of 100 would show this, on B Endocarditis.',
     );
-    expect(pet && apartSentence(pet, columns)).toBe('Contributor 2 20, You 50 of 100, on B Endocarditis.');
+    expect(pet && apartSentence(pet, columns)).toBe('Contributor 2: 20, You: 50 of 100, on B Endocarditis.');
     expect(cultures && apartSentence({ ...cultures, apart: null }, columns)).toBeNull();
   });
   it('do not make a difference of what nobody can see', () => {

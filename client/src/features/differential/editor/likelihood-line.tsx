@@ -5,6 +5,8 @@ import { NumberTrack } from './number-track';
 
 interface Props {
   column: Column;
+  /** What the number counts: "would show this". */
+  asked: string;
   text: string;
   onChange: (text: string) => void;
   others: readonly number[];
@@ -12,7 +14,7 @@ interface Props {
 }
 
 /** "If it were X, how many of 100 would show this?", for one candidate. */
-export function LikelihoodLine({ column, text, onChange, others, fault }: Props) {
+export function LikelihoodLine({ column, asked, text, onChange, others, fault }: Props) {
   const typed = parseOutOf100(text);
   const faultId = `fault-${column.id}`;
   return (
@@ -28,7 +30,7 @@ export function LikelihoodLine({ column, text, onChange, others, fault }: Props)
         }}
       />
       <NumberField
-        label={`If it were ${askedName(column)}, how many of 100 would show this?`}
+        label={`If it were ${askedName(column)}, how many of 100 ${asked}?`}
         value={text}
         onChange={onChange}
         fault={fault !== null}

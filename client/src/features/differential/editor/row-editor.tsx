@@ -3,6 +3,7 @@ import type { Finding } from '@weighhouse/shared/contracts/findings';
 import { useId } from 'react';
 import { SaveState } from '../../../components/save-state';
 import { useLedger } from '../ledger/ledger-context';
+import { askedWords, isPresence, levelName } from '../model/finding-words';
 import { textsOf } from '../typing/draft';
 import { ChangedMeanwhile } from './changed-meanwhile';
 import { ExposureChoice } from './exposure-choice';
@@ -36,10 +37,12 @@ export function RowEditor({ finding }: { finding: Finding }) {
           row.typeMore({ exposure });
         }}
       />
-      <h3 className="row-question">If it were each of these alone, how many of 100 would show this?</h3>
+      <h3 className="row-question">If it were each of these alone, how many of 100 {askedWords(finding)}?</h3>
       <p className="small soft">
         {finding.observed === 0 && row.levels === 2
-          ? 'It is absent here; still say how many would show it. '
+          ? isPresence(finding)
+            ? 'It is absent here; still say how many would show it. '
+            : `Here it is “${levelName(finding, 0)}”; still say how many ${askedWords(finding)}. `
           : ''}
         Blank is no opinion.
       </p>
@@ -60,6 +63,7 @@ export function RowEditor({ finding }: { finding: Finding }) {
             <LikelihoodLine
               key={column.id}
               column={column}
+              asked={askedWords(finding)}
               text={textsOf(row.draft, column.id, 1)[0] ?? ''}
               others={othersMarks(differential, finding.id, column.index)}
               fault={faultAt(column.id)}

@@ -67,6 +67,13 @@ describe('the form of a finding', () => {
     expect(paths({ ...levels, levelLabels: ['none'], observed: '0' })).toEqual(['levelLabels']);
   });
 
+  it('keeps the chosen level where a field before it is left blank', () => {
+    const levels = { ...good, ownLevels: true, levelLabels: ['', 'few', ' ', 'many'], observed: '3' };
+    expect(newBody(levels)).toMatchObject({ levelLabels: ['few', 'many'], observed: 1 });
+    expect(paths({ ...levels, observed: '2' })).toEqual(['observed']);
+    expect(newBody({ ...levels, observed: 'pending' })).toMatchObject({ observed: null });
+  });
+
   it('opens a finding as it is and sends it back the same', () => {
     const finding = makeFinding({
       levelLabels: ['none', 'few', 'many'],

@@ -91,13 +91,18 @@ export function bodyOf(values: FindingValues): Record<keyof NewFinding, unknown>
     if (trimmed === '') return null;
     return Number.isFinite(Number(trimmed)) ? Number(trimmed) : trimmed;
   };
-  const labels = values.levelLabels.map((label) => label.trim()).filter((label) => label !== '');
+  const labels = values.levelLabels.map((label) => label.trim());
+  const named = labels.filter((label) => label !== '');
   return {
     title: values.title,
     detail: values.detail,
     kind: values.kind === '' ? undefined : values.kind,
-    levelLabels: values.ownLevels ? labels : plainLevels,
-    observed: pending ? null : number(values.observed),
+    levelLabels: values.ownLevels ? named : plainLevels,
+    observed: pending
+      ? null
+      : values.ownLevels
+        ? placeOf(number(values.observed), labels)
+        : number(values.observed),
     reliability: values.reliability === '' ? undefined : values.reliability,
     groupId: values.groupId === '' ? null : values.groupId,
     observedOn: values.observedOn === '' ? null : values.observedOn,
@@ -106,6 +111,13 @@ export function bodyOf(values: FindingValues): Record<keyof NewFinding, unknown>
     burden: pending ? number(values.burden) : null,
     source: sourceOf(values, number(values.page)),
   };
+}
+
+/** The place of a chosen level among those that have a name: a field left blank in between is no level. */
+function placeOf(chosen: unknown, labels: readonly string[]): unknown {
+  if (typeof chosen !== 'number') return chosen;
+  if (labels[chosen] === '') return labels.length;
+  return chosen - labels.slice(0, chosen).filter((label) => label === '').length;
 }
 
 function sourceOf({ reportId, sourceText }: FindingValues, page: unknown): unknown {

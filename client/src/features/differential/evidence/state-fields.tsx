@@ -53,7 +53,7 @@ function LevelFields({ values, set, faults }: FieldsProps) {
       label="Levels"
       path="levelLabels"
       faults={faults}
-      hint="Two to six, of which exactly one is so. In order, from least to most where there is an order."
+      hint="Two to six, of which exactly one is so, in order from least to most where there is an order. A field left blank is no level."
     >
       {values.levelLabels.map((label, index) => (
         <TextField.Root

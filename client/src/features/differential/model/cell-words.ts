@@ -1,11 +1,11 @@
 import type { Finding } from '@weighhouse/shared/contracts/findings';
 import { naturalFrequency } from '@weighhouse/shared/reasoning/natural-frequency';
 import type { CellView, Figure } from './cells';
-import { isTwoLevel, levelName } from './finding-words';
+import { isPresence, levelName } from './finding-words';
 
 /** What would be seen, as it follows "88 of 100": "would show this", "would not show this", "would have few". */
 export function shownWords(finding: Finding, level: number): string {
-  if (!isTwoLevel(finding)) return `would have “${levelName(finding, level)}”`;
+  if (!isPresence(finding)) return `would have “${levelName(finding, level)}”`;
   return level === 0 ? 'would not show this' : 'would show this';
 }
 

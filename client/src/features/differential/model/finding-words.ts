@@ -6,6 +6,17 @@ export function isTwoLevel(finding: Pick<Finding, 'levelLabels'>): boolean {
   return finding.levelLabels.length <= 2;
 }
 
+/** The two levels are absent and present, and go without being named. */
+export function isPresence({ levelLabels }: Pick<Finding, 'levelLabels'>): boolean {
+  return levelLabels.length === 0 || (levelLabels.length === 2 && levelLabels.join() === 'absent,present');
+}
+
+/** What is asked for with one number for each candidate: "would show this", or the second of two levels by its name. */
+export function askedWords(finding: Pick<Finding, 'levelLabels'>): string {
+  if (!isTwoLevel(finding)) return 'would have each';
+  return isPresence(finding) ? 'would show this' : `would have “${levelName(finding, 1)}”`;
+}
+
 export function levelCount(finding: Pick<Finding, 'levelLabels'>): number {
   return Math.max(2, finding.levelLabels.length);
 }
