@@ -141,9 +141,17 @@ describe('candidates and settings', () => {
       conferenceAt,
       groups: [],
       together: [],
+      lastChange: { by: expect.stringMatching(/\w/), at: expect.any(String), reason: expect.any(String) },
     });
-    const kept = await change(id, { quorum: 4 }).expect(200);
-    expect(kept.body).toEqual({ ...body, quorum: 4 });
+    const why = 'Half the panel is on leave that week';
+    const kept = await people.chair.agent
+      .patch(`/api/cases/${id}/settings`)
+      .send({ quorum: 4, reason: why })
+      .expect(200);
+    expect(kept.body).toEqual({ ...body, quorum: 4, lastChange: expect.objectContaining({ reason: why }) });
+    // The team reads why, with the numbers.
+    const seen = await people.first.agent.get(`/api/cases/${id}/differential`).expect(200);
+    expect(seen.body.settings.lastChange).toEqual(kept.body.lastChange);
     expect((await change(id, { conferenceAt: null }).expect(200)).body.conferenceAt).toBeNull();
     await people.chair.agent.patch(`/api/cases/${id}/settings`).send({ quorum: 2 }).expect(400);
     const beyond = { tempering: 0.29, coexistence: 0.51, quorum: 1, conferenceAt: 'soon' };

@@ -252,6 +252,8 @@ export const settingsSchema = z
       z.object({ id: idSchema, label: z.string(), overlap: z.number(), reason: z.string().nullable() }),
     ),
     together: z.array(z.object({ a: idSchema, b: idSchema, times: z.number(), reason: z.string() })),
+    /** The latest change with the chair's words; null while the settings are those of a new case. */
+    lastChange: z.object({ by: z.string(), at: momentSchema, reason: z.string() }).nullable(),
   })
   .meta({ id: 'Settings' });
 export type Settings = z.infer<typeof settingsSchema>;

@@ -57,7 +57,9 @@ function SettingsForm({ of }: { of: Case }) {
   return (
     <form onSubmit={(event) => void submit(event)} noValidate>
       <h2 className="form-title">Settings of this case</h2>
-      <p className="soft prose">Every change and its reason stand in the trail.</p>
+      <p className="soft prose">
+        Every change stands in the trail. The last reason is shown to the team under “How it was pooled”.
+      </p>
       <div className="team-rest">
         <ErrorSummary faults={faults} labels={labels} title="The settings were not saved" />
         <FormField

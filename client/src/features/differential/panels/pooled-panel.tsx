@@ -1,3 +1,4 @@
+import { useFormat } from '../../../lib/use-format';
 import { counted, listed } from '../../../lib/words';
 import { useLedger } from '../ledger/ledger-context';
 import { disagreementWords } from '../model/disagreement-words';
@@ -57,12 +58,19 @@ export function PooledPanel() {
 function Method({ method }: { method: string }) {
   const { differential, columns } = useLedger();
   const { panel } = usePanelInForce();
+  const format = useFormat();
   const { settings } = differential;
   const about = panel ?? { tempering: settings.tempering, coexistence: 0 };
   return (
     <p className="side-about">
       Method <span className="figures">{method}</span>.{' '}
       {methodSentences(about, pairWords(settings.together, columns)).join(' ')}
+      {settings.lastChange && (
+        <span className="small soft why-more">
+          Last changed by {settings.lastChange.by}, {format.moment(settings.lastChange.at)}:{' '}
+          {settings.lastChange.reason}
+        </span>
+      )}
     </p>
   );
 }
