@@ -27,6 +27,9 @@ describe('the trail', () => {
     await people.first.agent.post(`/api/cases/${id}/findings`).send({ title: 'Rash' }).expect(201);
     const { items, total } = await trail(people.referrer, id);
     expect(total).toBe(items.length);
+    expect(items.map(({ sentence }) => sentence)).toContain(
+      `took ${people.chair.name} as chair onto the team`,
+    );
     expect(items[0]).toMatchObject({
       who: people.first.name,
       action: 'finding.added',

@@ -52,6 +52,17 @@ describe('the demo, seeded through the services', () => {
     expect(ledger.before).not.toBeNull();
   });
 
+  it('tells case A in the order in which it happened, everybody by name', async () => {
+    const agent = await as('chair-1');
+    const [a] = await casesOf(agent);
+    const { body } = await agent.get(`/api/cases/${a?.id ?? ''}/trail?size=200`).expect(200);
+    const { items, total } = body as { items: { at: string; sentence: string }[]; total: number };
+    expect(items).toHaveLength(total);
+    const moments = items.map(({ at }) => at);
+    expect(moments).toEqual([...moments].sort().reverse());
+    expect(items.map(({ sentence }) => sentence).filter((sentence) => sentence.includes('  '))).toEqual([]);
+  });
+
   it('has case B in its first sealed round with two of five in, and shows its chair no number', async () => {
     const agent = await as('chair-2');
     const b = (await casesOf(agent)).find((one) => one.round?.kind === 'sealed');

@@ -99,7 +99,6 @@ async function openSealed(
   calendar: DemoCalendar,
   daysAgo: number,
 ): Promise<string> {
-  stage.at(calendar.daysAgo(daysAgo, '08:30'));
   const deadline = new Date(stage.now().getTime() + 2 * 86_400_000).toISOString();
   stage.at(calendar.daysAgo(daysAgo, '08:30'));
   const round = await stage

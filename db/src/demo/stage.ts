@@ -31,9 +31,13 @@ export class Stage {
     if (moment < clock.now()) clock.set(moment);
   }
 
+  /** The real moment; what follows still happens at the one that was set. */
   now(): Date {
     const clock = this.service(Clock);
+    const shown = clock.now();
     clock.reset();
-    return clock.now();
+    const now = clock.now();
+    clock.set(shown);
+    return now;
   }
 }

@@ -37,12 +37,17 @@ export class TeamSeats {
     const known = await this.team.everybody(file.id, em);
     const now = known.filter((seat) => seat.leftAt === null);
     const asked = input ?? now.filter((seat) => seat.part !== 'chair').map(asInput);
-    const people = await this.people.byIds(
-      [...asked.map((item) => item.personId), ...known.map((seat) => seat.personId), file.referrerId],
-      em,
-    );
     const chairNow = now.find((seat) => seat.part === 'chair')?.personId ?? null;
     const chairId = options.acceptingChairId ?? chairNow;
+    const people = await this.people.byIds(
+      [
+        ...asked.map((item) => item.personId),
+        ...known.map((seat) => seat.personId),
+        file.referrerId,
+        ...(chairId === null ? [] : [chairId]),
+      ],
+      em,
+    );
     const answer = planTeam({
       input: asked,
       known,
