@@ -76,7 +76,9 @@ async function makeCast(running: RunningApp): Promise<Cast> {
 export async function acceptedCase(running: RunningApp, wishes: CaseWishes = {}): Promise<JudgedCase> {
   const cast = wishes.ownPeople === true ? await makeCast(running) : await castOf(running);
   const { referrer, chair, liaison } = cast;
-  const contributors = cast.specialists.slice(0, wishes.contributors ?? 3);
+  const wanted = wishes.contributors ?? 3;
+  while (cast.specialists.length < wanted) cast.specialists.push(await seat(running, 'specialist'));
+  const contributors = cast.specialists.slice(0, wanted);
 
   const opened = await referrer.agent
     .post('/api/cases')

@@ -1,8 +1,10 @@
 import { type QueryClient, useQueryClient } from '@tanstack/react-query';
 import type { Differential } from '@weighhouse/shared/contracts/differential';
 import {
+  type CaseAssessment,
   type CaseChanged,
   type CaseStanding,
+  caseAssessmentSchema,
   caseChangedSchema,
   casePresentSchema,
   caseStandingSchema,
@@ -36,6 +38,14 @@ function takeStanding(client: QueryClient, event: CaseStanding): void {
   });
   void client.invalidateQueries({ queryKey: key });
   void client.invalidateQueries({ queryKey: ['case', event.caseId, 'panel'] });
+}
+
+/** Puts the rest of an assessment that took its time on the screen; what was fetched meanwhile is as new. */
+function takeAssessment(client: QueryClient, event: CaseAssessment): void {
+  client.setQueryData<Differential>(['case', event.caseId, 'differential'], (known) => {
+    if (!known?.assessment || known.sealed || known.candidateSet !== event.candidateSet) return known;
+    return known.revision >= event.revision ? known : { ...known, assessment: event.assessment };
+  });
 }
 
 /**
@@ -73,6 +83,12 @@ export function useWatchCase(caseId: string): void {
           seen(event.data.revision);
           takeStanding(client, event.data);
         }
+      }),
+      liveConnection.on(liveEvents.assessment, (payload) => {
+        const event = caseAssessmentSchema.safeParse(payload);
+        // One that was overtaken on the way would take the newer standing off the screen again.
+        if (event.success && event.data.caseId === caseId && event.data.revision >= (last ?? 0))
+          takeAssessment(client, event.data);
       }),
     ];
     void liveConnection.whenConnected().then((now) => {

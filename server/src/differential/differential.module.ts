@@ -5,6 +5,7 @@ import { PeopleModule } from '../people/people.module.js';
 import { AgendaController } from './agenda/agenda.controller.js';
 import { AgendaReader } from './agenda/agenda-reader.js';
 import { AgendaService } from './agenda/agenda.service.js';
+import { Assessor } from './assessing/assessor.js';
 import { DraftsController } from './judgements/drafts.controller.js';
 import { DraftsService } from './judgements/drafts.service.js';
 import { JudgementStore } from './judgements/judgement-store.js';
@@ -35,7 +36,7 @@ import { PanelService } from './view/panel.service.js';
 
 const rounds = [RoundReader, RoundViews, RoundsService, OpenRoundsService, HandInsService, EndRoundsService];
 const judgements = [JudgementStore, JudgementWriter, JudgementsService, OwnJudgements, DraftsService];
-const pool = [Evidence, PoolReader, Snapshots, Assessments, StandingService];
+const pool = [Assessor, Evidence, PoolReader, Snapshots, Assessments, StandingService];
 const agenda = [AgendaReader, AgendaService];
 const views = [DifferentialService, LedgerParts, MineService, PanelService, SealsService];
 

@@ -1,7 +1,9 @@
-import { Injectable } from '@nestjs/common';
+import { Injectable, Logger, type OnModuleDestroy } from '@nestjs/common';
 import { OnEvent } from '@nestjs/event-emitter';
+import type { Part } from '@weighhouse/shared/contracts/cases';
 import { liveEvents } from '@weighhouse/shared/contracts/live';
 import { StandingService } from '../differential/pool/standing.service.js';
+import { viewOf } from '../differential/view/view-of.js';
 import { Clock } from '../platform/clock/clock.js';
 import { AccessChangedEvent, CaseChangedEvent } from '../platform/events/case-events.js';
 import { type Audience, Audiences } from './audience.js';
@@ -15,8 +17,10 @@ const sessionAgeMs = 60_000;
 
 /** Tells open pages what was committed: ids and the revision, and the standing to those who may see it. */
 @Injectable()
-export class LivePushes {
+export class LivePushes implements OnModuleDestroy {
+  private readonly log = new Logger('Live');
   private readonly order = new InOrder();
+  private closing = false;
 
   constructor(
     private readonly rooms: LiveRooms,
@@ -25,6 +29,10 @@ export class LivePushes {
     private readonly handshake: LiveHandshake,
     private readonly clock: Clock,
   ) {}
+
+  onModuleDestroy(): void {
+    this.closing = true;
+  }
 
   @OnEvent(CaseChangedEvent.eventName)
   changed(event: CaseChangedEvent): Promise<void> {
@@ -49,27 +57,55 @@ export class LivePushes {
   }
 
   private async push({ caseId, revision, what }: CaseChangedEvent): Promise<void> {
+    const heard = await this.listening(caseId);
+    if (!heard) return;
+    const { listening, seeing, sealed } = heard;
+    const current = movesStanding(what) && seeing.length > 0 ? await this.standings.current(caseId) : null;
+    // The standing first: it moves the screen, the rest makes it fetch.
+    if (current)
+      for (const { socket } of seeing) socket.emit(liveEvents.standing, { caseId, ...current.standing });
+    for (const { socket, hearing } of listening) {
+      if (hears(hearing, what, sealed)) socket.emit(liveEvents.changed, { caseId, revision, what });
+    }
+    if (current?.follows) this.follow(caseId, current.standing.revision);
+  }
+
+  /** Sends the rest when it is computed; nothing waits for it, and what is overtaken meanwhile is not sent. */
+  private follow(caseId: string, revision: number): void {
+    this.standings
+      .currentAssessment(caseId)
+      .then((current) =>
+        this.order.run(caseId, async () => {
+          const heard = current?.revision === revision ? await this.listening(caseId) : null;
+          if (!current || heard?.revision !== revision) return;
+          const { candidateSet, assessments } = current;
+          for (const { socket, parts } of heard.seeing) {
+            const assessment = assessments[viewOf(parts)];
+            socket.emit(liveEvents.assessment, { caseId, revision, candidateSet, assessment });
+          }
+        }),
+      )
+      .catch((error: unknown) => {
+        if (!this.closing)
+          this.log.error(error instanceof Error ? (error.stack ?? error.message) : String(error));
+      });
+  }
+
+  /** Who has the case open now, what each hears of it, and who of them may see the pool. */
+  private async listening(caseId: string) {
     const sockets = this.rooms.watching(caseId);
-    if (sockets.length === 0) return;
-    const audience = await this.audiences.of(caseId);
-    if (!audience) return;
-    const listening: { socket: LiveSocket; hearing: Hearing }[] = [];
+    const audience = sockets.length > 0 ? await this.audiences.of(caseId) : null;
+    if (!audience) return null;
+    const listening: { socket: LiveSocket; hearing: Hearing; parts: readonly Part[] }[] = [];
     for (const socket of sockets) {
       if (!(await this.stillIn(socket))) continue;
-      listening.push({ socket, hearing: await this.place(socket, caseId, audience) });
+      const { parts } = audience.subjectFor(socket.data.actor);
+      listening.push({ socket, hearing: await this.place(socket, caseId, audience), parts });
     }
     const seeing = listening.filter(({ socket: { data }, hearing }) =>
       hearsStanding(data.actor, audience.subjectFor(data.actor), hearing),
     );
-    if (movesStanding(what) && seeing.length > 0) {
-      const standing = await this.standings.current(caseId);
-      // The standing first: it moves the screen, the rest makes it fetch.
-      if (standing)
-        for (const { socket } of seeing) socket.emit(liveEvents.standing, { caseId, ...standing });
-    }
-    for (const { socket, hearing } of listening) {
-      if (hears(hearing, what, audience.sealed)) socket.emit(liveEvents.changed, { caseId, revision, what });
-    }
+    return { listening, seeing, sealed: audience.sealed, revision: audience.revision };
   }
 
   private async place(socket: LiveSocket, caseId: string, audience: Audience | null): Promise<Hearing> {

@@ -1,4 +1,10 @@
-import type { CaseChanged, CasePresent, CaseStanding, liveEvents } from '@weighhouse/shared/contracts/live';
+import type {
+  CaseAssessment,
+  CaseChanged,
+  CasePresent,
+  CaseStanding,
+  liveEvents,
+} from '@weighhouse/shared/contracts/live';
 import type { Server, Socket } from 'socket.io';
 import type { Actor } from '../platform/http/actor.js';
 
@@ -6,6 +12,7 @@ import type { Actor } from '../platform/http/actor.js';
 export interface Pushed {
   [liveEvents.changed]: (event: CaseChanged) => void;
   [liveEvents.standing]: (event: CaseStanding) => void;
+  [liveEvents.assessment]: (event: CaseAssessment) => void;
   [liveEvents.present]: (event: CasePresent) => void;
   exception: (body: unknown) => void;
 }

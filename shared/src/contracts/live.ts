@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { assessmentSchema } from './assessment.js';
 import { idSchema } from './common.js';
 
 /** Live events over socket.io at the path /live. The cookie authenticates. */
@@ -7,6 +8,7 @@ export const liveEvents = {
   unwatch: 'unwatch',
   changed: 'case.changed',
   standing: 'case.standing',
+  assessment: 'case.assessment',
   present: 'case.present',
 } as const;
 
@@ -42,6 +44,18 @@ export const caseStandingSchema = z.object({
   standing: z.array(z.number()),
 });
 export type CaseStanding = z.infer<typeof caseStandingSchema>;
+/**
+ * The whole assessment of a panel that takes long to compute, after its standing: next tests, influence and range. Of
+ * a panel that takes little it is not sent, because whoever hears of the change fetches it as fast.
+ */
+export const caseAssessmentSchema = z.object({
+  caseId: idSchema,
+  revision: z.int(),
+  candidateSet: z.int(),
+  /** With the keys of the contributors under which the receiver reads them in the differential. */
+  assessment: assessmentSchema,
+});
+export type CaseAssessment = z.infer<typeof caseAssessmentSchema>;
 /** How many people of the team have the case open. */
 export const casePresentSchema = z.object({ caseId: idSchema, people: z.int() });
 export type CasePresent = z.infer<typeof casePresentSchema>;

@@ -1,47 +1,61 @@
 import { Injectable, Logger } from '@nestjs/common';
 import type { PanelView } from '@weighhouse/shared/contracts/differential';
-import { assess, type Assessment, PanelRefused } from '@weighhouse/shared/reasoning/assess';
-import { type CasePool, panelOf, type PoolView } from './case-pool.js';
+import { type Assessment, PanelRefused, type StandingOnly } from '@weighhouse/shared/reasoning/assess';
+import { Assessor } from '../assessing/assessor.js';
+import type { Answers, Asked, Leading } from '../assessing/computations.js';
+import { isHeavy } from '../assessing/cost.js';
+import { type CasePool, keysOf, panelOf, type PoolView } from './case-pool.js';
+import { KeptPromises } from './kept-promises.js';
 import { canBePooled } from './panel-builder.js';
+import { withKeys } from './with-keys.js';
 
 const most = 200;
 
 /**
  * Assessments by case revision. The pool is always computed anew from the judgements, never patched; a revision's
- * result is kept, because what may be seen changes only with the revision.
+ * result is kept, because what may be seen changes only with the revision. Each is computed once, under the
+ * contributors' own ids; where those may not be seen they are replaced afterwards.
  */
 @Injectable()
 export class Assessments {
   private readonly logger = new Logger(Assessments.name);
-  private readonly kept = new Map<string, Assessment | null>();
+  private readonly wholes = new KeptPromises<Assessment | null>(most);
+  private readonly standings = new KeptPromises<StandingOnly | null>(most);
+
+  constructor(private readonly assessor: Assessor) {}
 
   /** The assessment of what may be seen; null where there is nothing to pool. */
-  of(pool: CasePool, view: PoolView): Assessment | null {
-    const key = `${pool.caseId} ${String(pool.revision)} ${view}`;
-    const known = this.kept.get(key);
-    const assessment = known === undefined ? this.compute(panelOf(pool, view)) : known;
-    // The one used last goes to the end; the one unused for longest is forgotten first.
-    this.kept.delete(key);
-    this.kept.set(key, assessment);
-    const oldest = this.kept.keys().next();
-    if (this.kept.size > most && oldest.done !== true) this.kept.delete(oldest.value);
-    return assessment;
+  async of(pool: CasePool, view: PoolView): Promise<Assessment | null> {
+    const assessment = await this.wholes.of(keyOf(pool), () =>
+      this.unlessRefused('whole', panelOf(pool, 'named')),
+    );
+    return assessment && view === 'anonymous' ? withKeys(assessment, keysOf(pool, view)) : assessment;
   }
 
-  /** Computes without keeping, for what is not committed yet. */
-  compute(panel: PanelView): Assessment | null {
-    return canBePooled(panel) ? this.unlessRefused(() => assess(panel)) : null;
+  /** The standing of what may be seen, which takes far less; null where there is nothing to pool. */
+  standingOf(pool: CasePool): Promise<StandingOnly | null> {
+    return this.standings.of(keyOf(pool), () => this.unlessRefused('standing', panelOf(pool, 'named')));
   }
 
-  /** Where one person stands alone; null before they said anything. */
-  standingAlone(panel: PanelView): number[] | null {
+  /** Whether the whole takes so long that it follows the standing by itself. */
+  follows(pool: CasePool): boolean {
+    return isHeavy(panelOf(pool, 'named'), 'whole');
+  }
+
+  /** What lists show, of what is not committed yet and therefore not kept. */
+  leading(panel: PanelView): Promise<Leading | null> {
+    return this.unlessRefused('leading', panel);
+  }
+
+  /** Where one person stands alone, or a pool that is not committed yet; null before anything was said. */
+  standing(panel: PanelView): Promise<StandingOnly | null> {
+    return this.unlessRefused('standing', panel);
+  }
+
+  private async unlessRefused<K extends Asked>(asked: K, panel: PanelView): Promise<Answers[K] | null> {
     if (!canBePooled(panel)) return null;
-    return this.unlessRefused(() => assess(panel, { only: 'standing' }).standing);
-  }
-
-  private unlessRefused<T>(compute: () => T): T | null {
     try {
-      return compute();
+      return await this.assessor.ask(asked, panel);
     } catch (error) {
       if (!(error instanceof PanelRefused)) throw error;
       // Paths say where the fault is and carry nobody's numbers.
@@ -50,3 +64,5 @@ export class Assessments {
     }
   }
 }
+
+const keyOf = (pool: CasePool): string => `${pool.caseId} ${String(pool.revision)}`;

@@ -1,4 +1,4 @@
-import type { Assessment } from '@weighhouse/shared/reasoning/assess';
+import type { Leading } from '../assessing/computations.js';
 import type { CasePool } from './case-pool.js';
 
 /** The name of the last column. */
@@ -20,7 +20,7 @@ export function leaderOf(standing: readonly number[]): number {
 /** What lists show of a case: the leader and how far its contributors are apart. */
 export function leaderColumns(
   pool: Pick<CasePool, 'candidates'>,
-  assessment: Pick<Assessment, 'standing' | 'disagreementBits'> | null,
+  assessment: Leading | null,
 ): { leaderName: string | null; leaderShare: number | null; disagreementBits: number | null } {
   if (!assessment) return { leaderName: null, leaderShare: null, disagreementBits: null };
   const leader = leaderOf(assessment.standing);

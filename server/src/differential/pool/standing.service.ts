@@ -1,10 +1,11 @@
 import { randomUUID } from 'node:crypto';
 import { Injectable, type OnModuleInit } from '@nestjs/common';
+import type { Assessment } from '@weighhouse/shared/reasoning/assess';
 import type { EntityManager } from 'typeorm';
 import { CaseChanges, type Consequence } from '../../cases/case-changes.js';
 import { Clock } from '../../platform/clock/clock.js';
 import { Assessments } from './assessments.js';
-import { type CasePool, openRound, panelOf } from './case-pool.js';
+import { type CasePool, openRound, panelOf, type PoolView } from './case-pool.js';
 import { columnNames, leaderColumns } from './leader.js';
 import { PoolReader } from './pool-reader.js';
 import { Snapshots } from './snapshots.js';
@@ -26,6 +27,19 @@ export interface CurrentStanding {
   standing: number[];
 }
 
+/** What is pushed of a case: its standing, and whether the rest takes so long that it follows by itself. */
+export interface CurrentPool {
+  standing: CurrentStanding;
+  follows: boolean;
+}
+
+/** The whole assessment as it is pushed, for those who see whose numbers they are and for those who don't. */
+export interface CurrentAssessment {
+  revision: number;
+  candidateSet: number;
+  assessments: Record<PoolView, Assessment>;
+}
+
 const movers: readonly string[] = ['team', 'settings', 'candidates', 'findings', 'round', 'judgements'];
 
 /** Where the panel stands, by the numbers that everybody on the case may see. */
@@ -44,13 +58,29 @@ export class StandingService implements OnModuleInit {
   }
 
   /** The standing to push; null while a sealed round is open or nothing may be seen yet. */
-  async current(caseId: string): Promise<CurrentStanding | null> {
-    const pool = await this.snapshots.run((em) => this.pools.read(caseId, em));
-    if (openRound(pool)?.kind === 'sealed') return null;
-    const assessment = this.assessments.of(pool, 'named');
-    if (!assessment) return null;
+  async current(caseId: string): Promise<CurrentPool | null> {
+    const pool = await this.open(caseId);
+    const alone = pool && (await this.assessments.standingOf(pool));
+    if (!alone) return null;
     const { revision, candidateSet } = pool;
-    return { revision, candidateSet, standing: assessment.standing };
+    const standing = { revision, candidateSet, standing: alone.standing };
+    return { standing, follows: this.assessments.follows(pool) };
+  }
+
+  /** The whole assessment to push; null while a sealed round is open or nothing may be seen yet. */
+  async currentAssessment(caseId: string): Promise<CurrentAssessment | null> {
+    const pool = await this.open(caseId);
+    const named = pool && (await this.assessments.of(pool, 'named'));
+    const anonymous = pool && (await this.assessments.of(pool, 'anonymous'));
+    if (!named || !anonymous) return null;
+    const { revision, candidateSet } = pool;
+    return { revision, candidateSet, assessments: { named, anonymous } };
+  }
+
+  /** What may be seen, unless a sealed round is open. */
+  private async open(caseId: string): Promise<CasePool | null> {
+    const pool = await this.snapshots.run((em) => this.pools.read(caseId, em));
+    return openRound(pool)?.kind === 'sealed' ? null : pool;
   }
 
   /**
@@ -65,7 +95,7 @@ export class StandingService implements OnModuleInit {
     roundId: string | null = null,
   ): Promise<KeptStanding | null> {
     const pool = await this.pools.read(caseId, em);
-    const assessment = this.assessments.compute(panelOf(pool, 'named'));
+    const assessment = await this.assessments.standing(panelOf(pool, 'named'));
     if (!assessment) return null;
     const id = randomUUID();
     const { candidateSet } = pool;
@@ -116,7 +146,7 @@ export class StandingService implements OnModuleInit {
     if (!movers.includes(what) || file.roundNumber === null) return {};
     const pool = await this.pools.read(file.id, em);
     return {
-      ...leaderColumns(pool, this.assessments.compute(panelOf(pool, 'named'))),
+      ...leaderColumns(pool, await this.assessments.leading(panelOf(pool, 'named'))),
       roundHandedIn: handedInNow(pool),
     };
   };

@@ -1,7 +1,8 @@
 import { Injectable } from '@nestjs/common';
 import type { CaseAction } from '@weighhouse/shared/access/actions';
 import type { Differential } from '@weighhouse/shared/contracts/differential';
-import { CaseAccess } from '../../cases/case-access.js';
+import type { EntityManager } from 'typeorm';
+import { CaseAccess, type OpenedCase } from '../../cases/case-access.js';
 import type { Actor } from '../../platform/http/actor.js';
 import { AgendaReader } from '../agenda/agenda-reader.js';
 import { Assessments } from '../pool/assessments.js';
@@ -31,26 +32,32 @@ export class DifferentialService {
    */
   async read(actor: Actor, caseId: string): Promise<Differential> {
     const opened = await this.access.open(actor, caseId, 'differential.read');
-    const view = viewOf(opened.parts);
-    return this.snapshots.run(async (em) => {
-      const pool = await this.pools.read(caseId, em);
-      const round = openRound(pool) ?? pool.rounds.at(-1) ?? null;
-      const parts = await this.ledgers.read(pool, actor, opened, em);
-      return {
-        caseId,
-        revision: pool.revision,
-        candidateSet: pool.candidateSet,
-        candidates: [...pool.candidates],
-        findings: [...pool.findings],
-        settings: pool.settings,
-        sealed: round?.state === 'open' && round.kind === 'sealed',
-        assessment: this.assessments.of(pool, view),
-        before: round ? await this.standings.before(pool, round.id, em) : null,
-        agenda: await this.agenda.of(pool, em),
-        abilities: abilitiesNow(opened.abilities, pool, actor.id),
-        ...parts,
-      };
-    });
+    const { pool, own, ...read } = await this.snapshots.run((em) => this.readAt(actor, opened, em));
+    // Computed when nothing is held in the database any more: a heavy panel takes its time.
+    const assessment = await this.assessments.of(pool, viewOf(opened.parts));
+    const standing = own && (await this.assessments.standing(own.panel));
+    const mine = own && { ...own.mine, standing: standing?.standing ?? null };
+    return { ...read, mine, assessment };
+  }
+
+  /** Everything that is read of the ledger, at one moment. */
+  private async readAt(actor: Actor, opened: OpenedCase, em: EntityManager) {
+    const pool = await this.pools.read(opened.file.id, em);
+    const round = openRound(pool) ?? pool.rounds.at(-1) ?? null;
+    return {
+      pool,
+      caseId: pool.caseId,
+      revision: pool.revision,
+      candidateSet: pool.candidateSet,
+      candidates: [...pool.candidates],
+      findings: [...pool.findings],
+      settings: pool.settings,
+      sealed: round?.state === 'open' && round.kind === 'sealed',
+      before: round ? await this.standings.before(pool, round.id, em) : null,
+      agenda: await this.agenda.of(pool, em),
+      abilities: abilitiesNow(opened.abilities, pool, actor.id),
+      ...(await this.ledgers.read(pool, actor, opened, em)),
+    };
   }
 }
 

@@ -6,7 +6,7 @@ import { PeopleDirectory } from '../../people/people-directory.js';
 import type { Actor } from '../../platform/http/actor.js';
 import { type CasePool, notIn, openRound, shownRound } from '../pool/case-pool.js';
 import { RoundViews } from '../rounds/round-views.js';
-import { MineService } from './mine.service.js';
+import { type MineRead, MineService } from './mine.service.js';
 import { othersOf } from './others.js';
 import { viewOf } from './view-of.js';
 
@@ -24,7 +24,7 @@ export class LedgerParts {
     actor: Actor,
     opened: OpenedCase,
     em: EntityManager,
-  ): Promise<Pick<Differential, 'round' | 'shownRound' | 'mine' | 'others'>> {
+  ): Promise<Pick<Differential, 'round' | 'shownRound' | 'others'> & { own: MineRead | null }> {
     const round = openRound(pool) ?? pool.rounds.at(-1) ?? null;
     const shown = shownRound(pool);
     const people = await this.people.byIds(
@@ -35,7 +35,7 @@ export class LedgerParts {
     return {
       round: round ? await this.rounds.one(round, em) : null,
       shownRound: shown ? { number: shown.number, live: shown.kind === 'live', notIn: names.sort() } : null,
-      mine: opened.parts.includes('contributor') ? await this.mine.of(pool, actor.id, em) : null,
+      own: opened.parts.includes('contributor') ? await this.mine.of(pool, actor.id, em) : null,
       others: shown ? othersOf(pool, viewOf(opened.parts), people, actor.id) : null,
     };
   }
