@@ -42,7 +42,7 @@ export class SettingsService {
   private async lastChange(caseId: string, em: EntityManager): Promise<Settings['lastChange']> {
     const change = await em.findOne(SettingsChange, { where: { caseId }, order: { id: 'DESC' } });
     if (!change) return null;
-    const by = (await this.people.byIds([change.changedById])).get(change.changedById)?.name ?? '';
+    const by = (await this.people.byIds([change.changedById], em)).get(change.changedById)?.name ?? '';
     return { by, at: change.changedAt.toISOString(), reason: change.reason };
   }
 }
