@@ -11,7 +11,7 @@ import { standingSentence, standingView } from '../model/standing-view';
 
 /** Where the panel stands, at the bottom of a phone: the leading candidates, and all of them on demand. */
 export function CompactStanding() {
-  const { differential, columns } = useLedger();
+  const { differential, columns, reading } = useLedger();
   const [all, setAll] = useState(false);
   const without = useWithout();
   const standing = differential.assessment?.standing ?? differential.mine?.standing ?? null;
@@ -20,7 +20,7 @@ export function CompactStanding() {
   return (
     <section className="compact-standing" aria-label="Where the panel stands">
       <div className="compact-head">
-        <h2>Where the panel stands</h2>
+        <h2>{reading.panelsOwn ? 'Where the panel stands' : 'Where the panel would stand'}</h2>
         <button
           type="button"
           className="text-button"

@@ -15,12 +15,14 @@ interface Props {
   row: number;
   place: number;
   cell: CellView;
+  /** One's own number of it is tried. */
+  tried: boolean;
   /** The way to how the number came about; null where there is none to tell. */
   why: ((panel: Panel) => void) | null;
 }
 
 /** What one finding says about one candidate: the figure, and the beam of its weight of evidence. */
-export function FindingCell({ finding, of, row, place, cell, why }: Props) {
+export function FindingCell({ finding, of, row, place, cell, tried, why }: Props) {
   const { column, folded } = of;
   const named = cell.figure && !isTwoLevel(finding) && finding.observed === null;
   const at = { 'data-row': row, 'data-column': place, tabIndex: -1 };
@@ -34,9 +36,13 @@ export function FindingCell({ finding, of, row, place, cell, why }: Props) {
     <td
       {...at}
       {...stuckProps(of, 'ledger-cell')}
+      data-tried={tried || undefined}
       data-unjudged={cell.unjudged === 'no' ? undefined : cell.unjudged}
     >
-      <span className="aside-text">{cellSentence(cell, finding)}</span>
+      <span className="aside-text">
+        {tried && 'Your number is a trial. '}
+        {cellSentence(cell, finding)}
+      </span>
       <span className="ledger-figure" aria-hidden="true">
         {cell.ownFigure && <span className="mark-diamond mark-diamond--inline" />}
         <span className="figures">{cell.figure && <MovingFigure share={cell.figure.share} />}</span>

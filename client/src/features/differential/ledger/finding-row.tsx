@@ -18,6 +18,10 @@ interface Props {
   cells: readonly CellView[];
   selected: boolean;
   unsaved: boolean;
+  /** What is tried on it, in words; null where nothing is. */
+  tried: string | null;
+  /** The ids of the columns in which one's own number is tried. */
+  triedColumns: readonly string[];
   /** The chair wants it discussed first. */
   onAgenda: boolean;
   why: ((panel: Panel) => void) | null;
@@ -25,7 +29,7 @@ interface Props {
 
 /** One finding across the candidates. Drawn anew only where something of this row changed. */
 export const FindingRow = memo(function FindingRow(props: Props) {
-  const { finding, row, shown, cells, selected, unsaved, onAgenda, why } = props;
+  const { finding, row, shown, cells, selected, unsaved, tried, triedColumns, onAgenda, why } = props;
   const format = useFormat();
   const state = finding.enteredInError ? 'error' : finding.observed === null ? 'pending' : 'observed';
   return (
@@ -35,12 +39,14 @@ export const FindingRow = memo(function FindingRow(props: Props) {
         className="ledger-title"
         data-row={row}
         data-column={0}
+        data-tried={tried !== null || undefined}
         data-without={leftOutAttribute({ kind: 'finding', id: finding.id })}
         tabIndex={-1}
       >
         <span className="ledger-name">{finding.title}</span>
         <span className="ledger-line">
           {unsaved && <b className="ledger-unsaved">Typed, not saved.</b>}
+          {tried !== null && <b className="ledger-tried">{tried}</b>}
           {onAgenda && <b className="ledger-agenda">Discuss first.</b>}
           {findingLine(finding, dayWords(format))}
         </span>
@@ -56,6 +62,7 @@ export const FindingRow = memo(function FindingRow(props: Props) {
               row={row}
               place={index + 1}
               cell={cell}
+              tried={triedColumns.includes(one.column.id)}
               why={why}
             />
           )

@@ -2,17 +2,23 @@ import { useState } from 'react';
 import type { ShownColumn } from '../columns/arrange';
 import { keepingRowCells } from '../model/row-cells';
 import { rowGroups } from '../model/rows';
+import { triedColumns, triedOnRow } from '../trial/trial-changes';
 import { FindingRow } from './finding-row';
 import { useLedger } from './ledger-context';
 
 /** The findings in their groups. */
 export function FindingRows({ shown }: { shown: readonly ShownColumn[] }) {
-  const { differential, columns, rows, panel, unsaved, open } = useLedger();
+  const { differential, columns, rows, panel, unsaved, open, reading } = useLedger();
   const [cellsOf] = useState(keepingRowCells);
   const cells = cellsOf(differential, rows, columns.length);
   const placeOf = new Map(rows.map((finding, index) => [finding.id, index + 1]));
   const agenda = new Set(differential.agenda.map((item) => item.findingId));
-  const selected = panel?.kind === 'row' ? panel.findingId : panel?.kind === 'why' ? panel.target : null;
+  const selected =
+    panel?.kind === 'row' || panel?.kind === 'trial'
+      ? panel.findingId
+      : panel?.kind === 'why'
+        ? panel.target
+        : null;
   return rowGroups(differential.findings).map((group) => (
     <tbody key={group.title}>
       <tr className="ledger-group">
@@ -29,6 +35,8 @@ export function FindingRows({ shown }: { shown: readonly ShownColumn[] }) {
           cells={cells.get(finding.id) ?? []}
           selected={selected === finding.id}
           unsaved={unsaved.has(finding.id)}
+          tried={triedOnRow(reading.trial, finding)}
+          triedColumns={triedColumns(reading.trial, finding.id)}
           onAgenda={agenda.has(finding.id)}
           why={differential.assessment ? open : null}
         />

@@ -18,6 +18,8 @@ export type Panel =
   /** The target is a finding's id, `prior` or `standing`. */
   | { kind: 'why'; target: string; column: number }
   | { kind: 'finding'; findingId: string | null }
+  /** Null: no finding is chosen yet. */
+  | { kind: 'trial'; findingId: string | null }
   | {
       kind:
         | 'pooled'

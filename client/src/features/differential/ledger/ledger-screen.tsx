@@ -35,6 +35,16 @@ export function LedgerScreen() {
   return (
     <section className="ledger-section" aria-label="Differential" {...pointing}>
       <RoundBar>
+        {!empty && (saved.assessment ?? saved.mine) && (
+          <Button
+            variant="ghost"
+            onClick={() => {
+              open({ kind: 'trial', findingId: null });
+            }}
+          >
+            What if
+          </Button>
+        )}
         {!empty && (
           <Button
             variant="ghost"

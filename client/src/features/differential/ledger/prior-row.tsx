@@ -7,14 +7,23 @@ import { MovingFigure } from './moving-figure';
 
 /** The first row: what the panel starts from. */
 export function PriorRow({ shown }: { shown: readonly ShownColumn[] }) {
-  const { panel, unsaved, differential } = useLedger();
+  const { panel, unsaved, differential, reading } = useLedger();
+  const tried = reading.trial.prior !== null;
   const selected = panel?.kind === 'prior' || (panel?.kind === 'why' && panel.target === 'prior');
   return (
     <tr className="ledger-row ledger-row--prior" aria-selected={selected}>
-      <th scope="row" className="ledger-title" data-row={0} data-column={0} tabIndex={-1}>
+      <th
+        scope="row"
+        className="ledger-title"
+        data-row={0}
+        data-column={0}
+        data-tried={tried || undefined}
+        tabIndex={-1}
+      >
         <span className="ledger-name">Before any finding</span>
         <span className="ledger-line">
           {unsaved.has('prior') && <b className="ledger-unsaved">Typed, not saved.</b>}
+          {tried && <b className="ledger-tried">Trial: your prior.</b>}
           {priorLine(differential)}
         </span>
       </th>

@@ -11,13 +11,15 @@ import { MovingFigure } from './moving-figure';
 
 /** The last row, always in view: where the panel stands. */
 export function StandingRow({ row, shown }: { row: number; shown: readonly ShownColumn[] }) {
-  const { differential, panel } = useLedger();
+  const { differential, panel, reading } = useLedger();
   const range = useLeaderRange();
   const without = useWithout();
   return (
     <tr className="ledger-standing" aria-selected={panel?.kind === 'why' && panel.target === 'standing'}>
       <th scope="row" className="ledger-title" data-row={row} data-column={0} tabIndex={-1}>
-        <span className="ledger-name">Where the panel stands</span>
+        <span className="ledger-name">
+          {reading.panelsOwn ? 'Where the panel stands' : 'Where the panel would stand'}
+        </span>
         {without ? (
           <span className="ledger-line" data-without-said>
             {without.sentence} The dashed line is the standing without it.
@@ -41,7 +43,8 @@ export function StandingRow({ row, shown }: { row: number; shown: readonly Shown
 
 function StandingCell({ of, row, place }: { of: ShownColumn; row: number; place: number }) {
   const { column, folded } = of;
-  const { differential } = useLedger();
+  const { differential, saved, reading } = useLedger();
+  const panels = reading.panelsOwn ? null : (saved.assessment?.standing[column.index] ?? null);
   const view = standingView(differential, column.index);
   const without = useWithout()?.standing?.[column.index] ?? null;
   const at = { 'data-row': row, 'data-column': place, tabIndex: -1 };
@@ -70,6 +73,9 @@ function StandingCell({ of, row, place }: { of: ShownColumn; row: number; place:
             : `${naturalFrequency(without).words} without`)}
         {view.share === null && view.own !== null && `you: ${naturalFrequency(view.own).words}`}
       </span>
+      {panels !== null && without === null && (
+        <span className="standing-like">the panel: {naturalFrequency(panels).outOf100}</span>
+      )}
       <span className="aside-text">{standingSentence(view)}</span>
     </td>
   );

@@ -44,6 +44,16 @@ export function RowPanel({ findingId }: { findingId: string }) {
         <Button variant="outline" disabled={index === rows.length - 1} onClick={step(1)}>
           Next row
         </Button>
+        {!finding.enteredInError && (
+          <Button
+            variant="outline"
+            onClick={() => {
+              open({ kind: 'trial', findingId: finding.id });
+            }}
+          >
+            What if
+          </Button>
+        )}
         {changeable && (
           <Button
             variant="outline"

@@ -3,6 +3,7 @@ import { ColumnsPanel } from '../columns/columns-panel';
 import { DiscussPanel } from '../discuss/discuss-panel';
 import { AssumptionPanel } from '../coexistence/assumption-panel';
 import { SetsPanel } from '../coexistence/sets-panel';
+import { TrialPanel } from '../trial/trial-panel';
 import { CandidatesPanel } from '../evidence/candidates-panel';
 import { type Panel, useLedger } from '../ledger/ledger-context';
 import { FindingPanel } from './finding-panel';
@@ -71,6 +72,8 @@ function contents(panel: Panel | null): ReactNode {
       return <ColumnsPanel />;
     case 'assumption':
       return <AssumptionPanel />;
+    case 'trial':
+      return <TrialPanel findingId={panel.findingId} />;
     case 'sets':
       return <SetsPanel />;
     case 'groups':
@@ -89,6 +92,8 @@ function contents(panel: Panel | null): ReactNode {
 function useFocusOnOpen(box: RefObject<HTMLElement | null>, panel: Panel | null): void {
   useLayoutEffect(() => {
     if (!panel || !box.current) return;
+    // Choosing among what can be tried leaves the hand where it is.
+    if (panel.kind === 'trial' && box.current.contains(document.activeElement)) return;
     const at = panel.kind === 'row' || panel.kind === 'prior' ? panel.at : null;
     const field = at && box.current.querySelector<HTMLInputElement>(`[data-field="${at.columnId}"]`);
     if (!field) {

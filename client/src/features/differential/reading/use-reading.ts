@@ -7,7 +7,7 @@ import type { Column } from '../model/columns';
 import { type Trial } from '../trial/trial';
 import { recallWish, rememberWish } from './kept-wish';
 import { readLedger, wishedPanel } from './read-ledger';
-import { useAssessed } from './use-assessed';
+import { isHeavy, useAssessed } from './use-assessed';
 import { type Assumption, assumed, isPanelsOwn, noWish, type Wish } from './wish';
 
 /** Which reading of the numbers is on the screen, and how to choose another. */
@@ -16,6 +16,8 @@ export interface Reading {
   panelsOwn: boolean;
   /** `computing`: what is wished is not on the screen yet. `refused`: it cannot be computed. */
   state: 'shown' | 'computing' | 'refused';
+  /** It takes long enough to be computed beside the page. */
+  heavy: boolean;
   /** The share with two or more of the candidates at once; 0 is one cause. */
   coexistence: number;
   /** The numbers behind the assessment on the screen, as assess() takes them; null while they are not here. */
@@ -65,6 +67,7 @@ export function useReading(
     () => ({
       panelsOwn,
       state: panelsOwn || (state === 'ready' && fits) ? 'shown' : failed ? 'refused' : 'computing',
+      heavy: wished !== null && isHeavy(wished),
       coexistence: differential.settings.coexistence,
       panel: saved.assessment && differential !== saved ? wished : pooled,
       trial: wish.trial,

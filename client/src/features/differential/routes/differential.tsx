@@ -11,6 +11,7 @@ import { WithoutProvider } from '../without/without-context';
 import '../ledger/ledger.css';
 import '../ledger/standing.css';
 import '../coexistence/coexistence.css';
+import '../trial/trial.css';
 import '../ledger/narrow-rows.css';
 import '../columns/columns.css';
 import '../ledger/side.css';
