@@ -7,7 +7,7 @@ import { LikelihoodLine } from '../editor/likelihood-line';
 import { othersMarks } from '../editor/others-marks';
 import { useLedger } from '../ledger/ledger-context';
 import type { Column } from '../model/columns';
-import { isTwoLevel, levelCount, levelName } from '../model/finding-words';
+import { askedWords, isTwoLevel, levelCount, levelName } from '../model/finding-words';
 import { numberText, parseOutOf100 } from '../typing/parse-number';
 import { readShares } from '../typing/sum';
 import { type TrialCell, withCell, withExposure, withObserved } from './trial';
@@ -57,7 +57,9 @@ export function TrialRowForm({ finding }: { finding: Finding }) {
               reading.tryOut(withExposure(trial, finding.id, next === known?.exposure ? null : next));
             }}
           />
-          <h3 className="row-question">And if you had said: of 100 with each alone, so many show this?</h3>
+          <h3 className="row-question">
+            And if you had said: of 100 with each of these alone, how many {askedWords(finding)}?
+          </h3>
           <div className="likelihoods">
             {columns.map((column) => (
               <TriedCell
@@ -99,6 +101,7 @@ function TriedCell({ finding, column, saved, tried }: CellProps) {
       <div data-tried={tried !== undefined || undefined} className="tried-cell">
         <LikelihoodLine
           column={column}
+          asked={askedWords(finding)}
           text={text}
           others={othersMarks(differential, finding.id, column.index)}
           fault={read.kind === 'fault' ? read.message : null}
