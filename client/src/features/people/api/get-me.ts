@@ -1,6 +1,7 @@
 import { queryOptions, useQuery } from '@tanstack/react-query';
 import { type Me, meSchema } from '@weighhouse/shared/contracts/people';
 import { isApiError, request } from '../../../lib/api';
+import { keepFor } from '../../../lib/kept';
 
 /**
  * Who is signed in; null for nobody.
@@ -9,7 +10,9 @@ import { isApiError, request } from '../../../lib/api';
  */
 async function getMe(signal: AbortSignal, known: boolean): Promise<Me | null> {
   try {
-    return await request('GET', '/api/session', { schema: meSchema, signal, wait: known });
+    const me = await request('GET', '/api/session', { schema: meSchema, signal, wait: known });
+    keepFor(me.id);
+    return me;
   } catch (error) {
     if (isApiError(error) && error.status === 401 && !known) return null;
     throw error;

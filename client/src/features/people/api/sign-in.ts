@@ -1,6 +1,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { meSchema, type SignIn } from '@weighhouse/shared/contracts/people';
 import { request } from '../../../lib/api';
+import { keepFor } from '../../../lib/kept';
 import { liveConnection } from '../../../lib/live-connection';
 import { decideSession } from '../../../lib/session';
 import { meQuery } from './get-me';
@@ -16,6 +17,7 @@ export function useSignIn() {
     onSuccess: (me) => {
       const before = client.getQueryData(meQuery.queryKey);
       const same = before?.id === me.id;
+      keepFor(me.id);
       if (!same) leaveNothing(client);
       client.setQueryData(meQuery.queryKey, me);
       decideSession(same);
