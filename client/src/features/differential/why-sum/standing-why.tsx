@@ -108,7 +108,7 @@ type AddedProps = ReturnType<typeof usePanelInForce> & {
 };
 
 function Added({ assessment, panel, oneCause, column, against }: AddedProps) {
-  const state = useWhySum(assessment, panel, column.index, against);
+  const state = useWhySum(assessment, panel, { column: column.index, against, oneCause });
   if (!('sum' in state))
     return (
       <p className="soft" role="status">

@@ -3,6 +3,7 @@ import { useLedger } from '../ledger/ledger-context';
 
 /** The numbers behind the assessment on the screen, and whether candidates exclude each other in it. */
 export function usePanelInForce(): { panel: PanelView | null; oneCause: boolean } {
-  const { reading } = useLedger();
-  return { panel: reading.panel, oneCause: reading.coexistence === 0 };
+  const { differential, reading } = useLedger();
+  const panel = differential.assessment ? reading.panel : null;
+  return { panel, oneCause: reading.coexistence === 0 };
 }

@@ -2,9 +2,8 @@ import type { AssessmentView } from '@weighhouse/shared/contracts/assessment';
 import type { PanelView } from '@weighhouse/shared/contracts/differential';
 import { useEffect, useMemo, useState } from 'react';
 import { columnSum } from './column-sum';
-import type { Against } from './comparison';
 import { countedPanel } from './counted-panel';
-import { countingFindings, oneCauseStandings, stepByStep, stepSum } from './step-sum';
+import { type Comparison, countingFindings, oneCauseStandings, stepByStep, stepSum } from './step-sum';
 import { useAssess } from './use-assess';
 import type { WhySum } from './why-sum';
 
@@ -21,10 +20,8 @@ const turn = 12;
 export function useWhySum(
   assessment: AssessmentView,
   panel: PanelView | null,
-  column: number,
-  against: Against,
+  { column, against, oneCause }: Comparison,
 ): SumState {
-  const oneCause = (panel?.coexistence ?? 0) === 0;
   const direct = useMemo(() => {
     if (!oneCause) return null;
     if (against !== 'rest') return columnSum(assessment, column, against);
@@ -34,15 +31,14 @@ export function useWhySum(
       oneCause: true,
     });
   }, [oneCause, assessment, column, against]);
-  const asked = useAskedSum(oneCause ? null : panel, assessment, column, against);
+  const asked = useAskedSum(oneCause ? null : panel, assessment, { column, against, oneCause });
   return direct ? { sum: direct } : asked;
 }
 
 function useAskedSum(
   panel: PanelView | null,
   assessment: AssessmentView,
-  column: number,
-  against: Against,
+  { column, against, oneCause }: Comparison,
 ): SumState {
   const assess = useAssess(panel !== null);
   const of = 2 * countingFindings(assessment).length + 2;
@@ -52,7 +48,7 @@ function useAskedSum(
     const steps = stepByStep(
       countingFindings(assessment),
       (counted) => assess(countedPanel(panel, counted), { only: 'standing' }).standing,
-      { column, against, oneCause: false },
+      { column, against, oneCause },
     );
     let timer: ReturnType<typeof setTimeout> | undefined;
     const some = () => {
@@ -73,6 +69,6 @@ function useAskedSum(
     return () => {
       clearTimeout(timer);
     };
-  }, [panel, assess, assessment, column, against, of]);
+  }, [panel, assess, assessment, column, against, oneCause, of]);
   return state;
 }
