@@ -13,12 +13,20 @@ import './findings.css';
 interface Props {
   groups: Settings['groups'];
   findings: readonly Finding[];
-  onSave: (groups: GroupInput[], reason: string) => Promise<unknown>;
+  /** Resolves to what is saved now. */
+  onSave: (groups: GroupInput[], reason: string) => Promise<Pick<Settings, 'groups'>>;
 }
 
 /** The whole list of groups, changed at once and with a reason. */
 export function GroupsForm({ groups, findings, onSave }: Props) {
   const [values, setValues] = useState<GroupValues[]>(() => valuesOfGroups(groups));
+  const [known, setKnown] = useState(groups);
+  // A group that was made elsewhere meanwhile joins what is typed here; else saving this list would dissolve it.
+  const arrived = groups.filter((group) => known.every(({ id }) => id !== group.id));
+  if (arrived.length > 0) {
+    setKnown(groups);
+    setValues([...values, ...valuesOfGroups(arrived)]);
+  }
   const [reason, setReason] = useState('');
   const [error, setError] = useState<unknown>(null);
   const [state, setState] = useState<'typing' | 'saving' | 'saved'>('typing');
@@ -38,7 +46,9 @@ export function GroupsForm({ groups, findings, onSave }: Props) {
     setState('saving');
     setError(null);
     try {
-      await onSave(read.groups, reason.trim());
+      const saved = await onSave(read.groups, reason.trim());
+      setKnown(saved.groups);
+      setValues(valuesOfGroups(saved.groups));
       setReason('');
       setState('saved');
     } catch (failed) {

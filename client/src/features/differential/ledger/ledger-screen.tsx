@@ -3,6 +3,7 @@ import { useRef } from 'react';
 import { Caution } from '../../../components/caution';
 import { MarksKey } from '../../../components/marks/marks-key';
 import { LedgerCards } from '../cards/ledger-cards';
+import { DoubleCounting } from '../double-counting/double-counting';
 import { SidePanel } from '../panels/side-panel';
 import { PriorFirst } from '../prior-first/prior-first';
 import { AssumptionSwitch } from '../reading/assumption-switch';
@@ -101,6 +102,7 @@ export function LedgerScreen() {
                 before={differential.before !== null && differential.assessment !== null}
               />
             )}
+            <DoubleCounting />
             <div className="actions no-print ledger-add">
               {may('finding.add') && (
                 <Button

@@ -1,3 +1,4 @@
+import { DoubleCounting } from '../double-counting/double-counting';
 import { GroupsForm } from '../evidence/groups-form';
 import { useLedger } from '../ledger/ledger-context';
 import { useChangeSettings } from '../api/change-settings';
@@ -15,6 +16,7 @@ export function GroupsPanel() {
         separate mechanisms, 100 for the same finding twice. A finding joins a group where the finding is
         changed.
       </p>
+      <DoubleCounting />
       {may('settings.change') ? (
         <GroupsForm
           groups={differential.settings.groups}

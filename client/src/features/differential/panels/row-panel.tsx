@@ -11,6 +11,7 @@ import { dayWords } from '../model/day-words';
 import { effortWords, reliabilityWord, sourceWords, stateWords } from '../model/finding-words';
 import { WithoutButton } from '../without/without-button';
 import { CellList } from './cell-list';
+import { RowVoices } from './row-voices';
 import { SideHeading } from './side-panel';
 
 /** One finding at the side: what it is, one's own judgement of it, and where the panel is apart. */
@@ -37,6 +38,7 @@ export function RowPanel({ findingId }: { findingId: string }) {
       )}
       <ApartNote finding={finding} />
       <WithoutButton left={{ kind: 'finding', id: finding.id }} name={`“${finding.title}”`} />
+      <RowVoices finding={finding} />
       <div className="actions side-actions">
         <Button variant="outline" disabled={index === 0} onClick={step(-1)}>
           Row before

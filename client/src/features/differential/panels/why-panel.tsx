@@ -62,6 +62,17 @@ export function WhyPanel({ target, column: index }: { target: string; column: nu
         lines={whyCell(differential, finding, index, weightOf)}
         shown={shownWords(finding, cell.figure?.level ?? finding.observed ?? 1)}
       />
+      <p>
+        <button
+          type="button"
+          className="text-button"
+          onClick={() => {
+            open({ kind: 'row', findingId: finding.id, at: null });
+          }}
+        >
+          The whole row
+        </button>
+      </p>
       <p>{pooled}</p>
     </>
   );

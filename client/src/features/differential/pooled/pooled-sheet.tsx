@@ -27,7 +27,7 @@ interface Props {
  * that printing it prints nothing else.
  */
 export function PooledSheet({ panel, assessment, onPrinted }: Props) {
-  const { differential, columns } = useLedger();
+  const { differential, columns, reading } = useLedger();
   const case_ = useCase(differential.caseId).data;
   const format = useFormat();
   const people = usePeople(panel);
@@ -61,7 +61,7 @@ export function PooledSheet({ panel, assessment, onPrinted }: Props) {
       <header>
         <h1>How it was pooled{case_ ? `: ${case_.number}` : ''}</h1>
         <p>
-          {case_?.question}{' '}
+          {case_?.question} {!reading.panelsOwn && <b>One person’s reading, not the panel’s own. </b>}
           {shownRound &&
             `Round ${String(shownRound.number)}, ${shownRound.live ? 'live' : 'as it was unsealed'}. `}
           {shownRound && shownRound.notIn.length > 0 && `Not in: ${listed(shownRound.notIn)}. `}

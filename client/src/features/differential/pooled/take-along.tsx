@@ -9,7 +9,7 @@ import { PooledSheet } from './pooled-sheet';
 
 /** The panel on one page of paper, and as the file that the method takes: for checking outside. */
 export function TakeAlong() {
-  const { differential, may } = useLedger();
+  const { differential, may, reading } = useLedger();
   const { panel } = usePanelInForce();
   const case_ = useCase(differential.caseId).data;
   const download = useDownloadExport(differential.caseId, case_?.number ?? 'case');
@@ -45,6 +45,11 @@ export function TakeAlong() {
       {sealed && shownRound && (
         <p className="small soft">
           Both hold what round {shownRound.number} left, as it was unsealed: nothing of the sealed round.
+        </p>
+      )}
+      {!reading.panelsOwn && (
+        <p className="small soft">
+          The page holds your reading, and says so; the JSON holds the panel’s own numbers.
         </p>
       )}
       <FailureLine error={download.error} />

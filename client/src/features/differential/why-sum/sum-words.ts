@@ -4,7 +4,8 @@ import type { Column } from '../model/columns';
 import { isTwoLevel, levelName } from '../model/finding-words';
 import { factorOf } from './comparison';
 
-/** Odds as two small whole numbers: "about 3 to 2", "about even". The nearest within six in a hundred, from memory. */
+/** Odds as two small whole numbers: "about 3 to 2", "about even". Within six in a hundred,
+ * above 3 to 1 within ten: our own measure. */
 export function oddsWords(odds: number): string {
   if (!(odds > 0) || !Number.isFinite(odds)) return 'beyond 99 to 1';
   const larger = Math.max(odds, 1 / odds);
@@ -17,7 +18,7 @@ export function oddsWords(odds: number): string {
 function smallNumbers(ratio: number): [number, number] {
   for (const below of [1, 2, 3, 4, 5]) {
     const above = Math.round(ratio * below);
-    if (Math.abs(Math.log(above / below / ratio)) <= Math.log(1.06)) return [above, below];
+    if (Math.abs(Math.log(above / below / ratio)) <= Math.log(ratio < 3 ? 1.06 : 1.1)) return [above, below];
   }
   return [Math.round(ratio * 10), 10];
 }

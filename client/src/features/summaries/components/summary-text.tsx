@@ -1,3 +1,5 @@
+import { HundredMarks } from '../../../components/marks/hundred-marks';
+import { numberTold } from '../model/number-told';
 import { paragraphsOf } from '../model/summary-words';
 
 /** The text as the patient hears or reads it. */
@@ -7,8 +9,19 @@ export function SummaryText({ body }: { body: string }) {
   return (
     <div className="summary-text">
       {paragraphs.map((paragraph, place) => (
-        <p key={`${String(place)} ${paragraph}`}>{paragraph}</p>
+        <Paragraph key={`${String(place)} ${paragraph}`} text={paragraph} />
       ))}
     </div>
+  );
+}
+
+/** A paragraph, with its number drawn where it tells one. */
+function Paragraph({ text }: { text: string }) {
+  const told = numberTold(text);
+  return (
+    <>
+      <p>{text}</p>
+      {told && <HundredMarks outOf100={told.outOf100} label={`${told.words}, drawn as 100 small marks`} />}
+    </>
   );
 }
