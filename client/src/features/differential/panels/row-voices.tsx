@@ -47,22 +47,31 @@ export function RowVoices({ finding }: { finding: Finding }) {
 
 function VoiceRow({ line }: { line: RowVoice }) {
   const { voice, exposure, weight, reason, shares } = line;
+  const said = reason !== null && reason !== '';
   return (
-    <tr data-you={voice.you || undefined}>
-      <th scope="row">
-        {voice.name}
-        <span className="small soft why-more">
-          Sees it {exposureWords[exposure]}
-          {weight !== null && `, weight ${String(weight)}`}
-        </span>
-        {reason !== null && reason !== '' && <span className="small why-more">“{reason}”</span>}
-      </th>
-      {shares.map((share, index) => (
-        <td key={index} className="figures why-number">
-          {share === null ? '–' : short(naturalFrequency(share).outOf100)}
-        </td>
-      ))}
-    </tr>
+    <>
+      <tr data-you={voice.you || undefined} data-more={said || undefined}>
+        <th scope="row">
+          {voice.name}
+          <span className="small soft why-more">
+            Sees it {exposureWords[exposure]}
+            {weight !== null && `, weight ${String(weight)}`}
+          </span>
+        </th>
+        {shares.map((share, index) => (
+          <td key={index} className="figures why-number">
+            {share === null ? '–' : short(naturalFrequency(share).outOf100)}
+          </td>
+        ))}
+      </tr>
+      {said && (
+        <tr>
+          <td className="small" colSpan={shares.length + 1}>
+            “{reason}”
+          </td>
+        </tr>
+      )}
+    </>
   );
 }
 
