@@ -5,6 +5,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
   acceptedCase,
   castOf,
+  handIn,
   judge,
   type JudgedCase,
   openRound,
@@ -12,8 +13,11 @@ import {
   savePrior,
   saveRow,
   seat,
+  teamOf,
+  unsealedCase,
 } from '../factories/judgements.js';
 import { type RunningApp, startApp } from '../setup/app.js';
+import { mailbox } from '../setup/mailbox.js';
 import { paths, refusal } from '../setup/refusals.js';
 
 let running: RunningApp;
@@ -88,6 +92,92 @@ describe('opening a round', () => {
     const answers = await Promise.all([ask(), ask(), ask()]);
     expect(answers.map((answer) => answer.status).sort()).toEqual([201, 409, 409]);
     expect(await roundsOf(case_, case_.chair)).toHaveLength(1);
+  });
+});
+
+describe('the letter when a round opens', () => {
+  const box = mailbox();
+
+  it.each(['sealed', 'live'] as const)('goes to everybody who judges but who opened it: %s', async (kind) => {
+    const case_ = kind === 'live' ? await unsealedCase(running) : await acceptedCase(running);
+    const { id, number, chair, contributors } = case_;
+    const team = [...teamOf(case_), { personId: chair.id, part: 'contributor' as const }];
+    await chair.agent.put(`/api/cases/${id}/team`).send(team).expect(200);
+    await running.outbox.flush();
+    box.clear();
+    const round = await openRound(case_, kind);
+    await running.outbox.flush();
+    const sent = await box.messages();
+    expect(sent.map(({ to }) => String(to)).sort()).toEqual(contributors.map(({ email }) => email).sort());
+    for (const { subject, text } of sent) {
+      expect(subject).toBe(`Round ${String(round.number)} of case ${number} is open`);
+      expect(text).toContain(`/cases/${id}`);
+      expect(text).not.toMatch(/fever|rash|ferritin|still|lymphoma|illness/i);
+    }
+  });
+
+  it('is not written when the round is not opened', async () => {
+    const case_ = await acceptedCase(running, { findings: [] });
+    await running.outbox.flush();
+    box.clear();
+    await case_.chair.agent.post(`/api/cases/${case_.id}/rounds`).send({ kind: 'sealed' }).expect(409);
+    await running.outbox.flush();
+    expect(await box.messages()).toEqual([]);
+  });
+});
+
+describe('withdrawing a case', () => {
+  const withdraw = async (case_: JudgedCase) => {
+    const words = { words: 'Consent was withdrawn' };
+    await case_.referrer.agent.post(`/api/cases/${case_.id}/withdraw`).send(words).expect(200);
+    const { body } = await case_.referrer.agent.get(`/api/cases/${case_.id}/trail`).expect(200);
+    return (body.items as { action: string; sentence: string }[])[0];
+  };
+
+  it('ends a sealed round sealed for good: its numbers are shown to nobody', async () => {
+    const case_ = await acceptedCase(running);
+    const round = await openRound(case_, 'sealed');
+    for (const [k, person] of case_.contributors.entries()) {
+      await judge(case_, person, k as 0 | 1 | 2);
+      await handIn(round, person);
+    }
+    expect(await withdraw(case_)).toMatchObject({
+      action: 'case.withdrawn',
+      sentence: 'withdrew the case, which closed round 1; its numbers stay sealed for good',
+    });
+    const [ended] = await roundsOf(case_, case_.referrer);
+    expect(ended).toMatchObject({ id: round.id, state: 'closed', unsealedAt: null });
+    expect(ended?.closedAt).not.toBeNull();
+    const seen = (await case_.referrer.agent.get(`/api/cases/${case_.id}`).expect(200)).body as Case;
+    expect(seen.round).toMatchObject({ number: 1, open: false, handedIn: 3 });
+    const ledger = await readDifferential(case_, case_.referrer);
+    expect(ledger).toMatchObject({
+      assessment: null,
+      others: null,
+      mine: null,
+      shownRound: null,
+      before: null,
+    });
+    await case_.referrer.agent.get(`/api/cases/${case_.id}/panel`).expect(403);
+    const { body } = await case_.referrer.agent.get(`/api/cases/${case_.id}/seals`).expect(200);
+    for (const seal of body.items as { random: unknown; document: unknown }[])
+      expect(seal).toMatchObject({ random: null, document: null });
+    for (const { agent } of [case_.chair, ...case_.contributors]) {
+      await agent.post(`/api/rounds/${round.id}/unseal`).send({ reason: 'all the same' }).expect(403);
+      await agent.get(`/api/cases/${case_.id}/differential`).expect(403);
+    }
+  });
+
+  it('closes a live round, and opens nothing again', async () => {
+    const case_ = await unsealedCase(running);
+    await openRound(case_, 'live');
+    expect(await withdraw(case_)).toMatchObject({ sentence: 'withdrew the case, which closed round 2' });
+    const rounds = await roundsOf(case_, case_.referrer);
+    expect(rounds.map(({ state }) => state)).toEqual(['unsealed', 'closed']);
+  });
+
+  it('says nothing of rounds where none is open', async () => {
+    expect(await withdraw(await acceptedCase(running))).toMatchObject({ sentence: 'withdrew the case' });
   });
 });
 

@@ -21,6 +21,16 @@ export class CaseLetters {
     await this.send(em, file, personIds, `You are asked to judge case ${file.number}`);
   }
 
+  /** To contributors, when a round is opened in which they judge. */
+  async roundOpened(
+    em: EntityManager,
+    file: Named,
+    round: { number: number },
+    personIds: readonly string[],
+  ): Promise<void> {
+    await this.send(em, file, personIds, `Round ${String(round.number)} of case ${file.number} is open`);
+  }
+
   /** To the referrer, when a chair has decided. */
   async tellReferrer(
     em: EntityManager,

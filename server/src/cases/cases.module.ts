@@ -21,7 +21,7 @@ import { TeamService } from './team.service.js';
 import { TeamWriter } from './team-writer.js';
 
 /** What every later domain builds on. */
-const foundations = [CaseAccess, CaseChanges, CaseDirectory, CaseFacts, TeamReader];
+const foundations = [CaseAccess, CaseChanges, CaseDirectory, CaseFacts, CaseLetters, TeamReader];
 /** The moves, for whoever makes them without a browser, such as the demonstration's seed. */
 const moves = [DraftsService, ReferrerMoves, ChairMoves, AcceptService, TeamService];
 
@@ -32,7 +32,6 @@ const moves = [DraftsService, ReferrerMoves, ChairMoves, AcceptService, TeamServ
   providers: [
     ...foundations,
     ...moves,
-    CaseLetters,
     CaseListService,
     CaseReadingService,
     CaseViews,

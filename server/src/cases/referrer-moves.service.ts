@@ -7,6 +7,7 @@ import { AccessChangedEvent } from '../platform/events/case-events.js';
 import type { Actor } from '../platform/http/actor.js';
 import { CaseAccess } from './case-access.js';
 import { CaseChanges } from './case-changes.js';
+import type { CaseFile } from './case-file.entity.js';
 import { CaseViews } from './case-views.js';
 import { wordsColumns } from './case-words.js';
 import { missingParts } from './missing-parts.js';
@@ -43,7 +44,10 @@ export class ReferrerMoves {
     return this.views.view(actor, opened);
   }
 
-  /** Freezes the case at once: from here on it is open to the referrer alone. */
+  /**
+   * Freezes the case at once: from here on it is open to the referrer alone. An open round ends with it; what was
+   * sealed is shown to nobody any more.
+   */
   async withdraw(actor: Actor, caseId: string, words: string): Promise<Case> {
     const opened = await this.work.run(async (work) => {
       const found = await this.access.open(actor, caseId, 'case.withdraw', work.em);
@@ -51,7 +55,7 @@ export class ReferrerMoves {
         work,
         found.file,
         'case',
-        { actorId: actor.id, action: 'case.withdrawn', sentence: 'withdrew the case' },
+        { actorId: actor.id, action: 'case.withdrawn', sentence: withdrawnWords(found.file) },
         { state: 'withdrawn', ...wordsColumns('withdrawn', words, actor.id, this.clock.now()) },
       );
       const team = await this.team.current(caseId, work.em);
@@ -61,4 +65,11 @@ export class ReferrerMoves {
     });
     return this.views.view(actor, opened);
   }
+}
+
+/** Said before the round is closed with the case. */
+function withdrawnWords({ roundOpen, roundKind, roundNumber }: CaseFile): string {
+  if (!roundOpen) return 'withdrew the case';
+  const ended = `withdrew the case, which closed round ${String(roundNumber)}`;
+  return roundKind === 'sealed' ? `${ended}; its numbers stay sealed for good` : ended;
 }

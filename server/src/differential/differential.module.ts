@@ -22,6 +22,7 @@ import { CaseRoundsController } from './rounds/case-rounds.controller.js';
 import { EndRoundsService } from './rounds/end-rounds.service.js';
 import { HandInsService } from './rounds/hand-ins.service.js';
 import { OpenRoundsService } from './rounds/open-rounds.service.js';
+import { RoundBeginning } from './rounds/round-beginning.js';
 import { RoundReader } from './rounds/round-reader.js';
 import { RoundViews } from './rounds/round-views.js';
 import { RoundsController } from './rounds/rounds.controller.js';
@@ -34,7 +35,15 @@ import { LedgerParts } from './view/ledger-parts.service.js';
 import { MineService } from './view/mine.service.js';
 import { PanelService } from './view/panel.service.js';
 
-const rounds = [RoundReader, RoundViews, RoundsService, OpenRoundsService, HandInsService, EndRoundsService];
+const rounds = [
+  RoundReader,
+  RoundViews,
+  RoundsService,
+  RoundBeginning,
+  OpenRoundsService,
+  HandInsService,
+  EndRoundsService,
+];
 const judgements = [JudgementStore, JudgementWriter, JudgementsService, OwnJudgements, DraftsService];
 const pool = [Assessor, Evidence, PoolReader, Snapshots, Assessments, StandingService];
 const agenda = [AgendaReader, AgendaService];

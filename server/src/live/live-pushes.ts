@@ -35,8 +35,9 @@ export class LivePushes implements OnModuleDestroy {
   }
 
   @OnEvent(CaseChangedEvent.eventName)
-  changed(event: CaseChangedEvent): Promise<void> {
-    return this.order.run(event.caseId, () => this.push(event));
+  async changed(event: CaseChangedEvent): Promise<void> {
+    if (this.closing) return;
+    await this.order.run(event.caseId, () => this.push(event));
   }
 
   /** Throws out whoever is no longer let in, at once. */

@@ -1,8 +1,8 @@
-import { Injectable } from '@nestjs/common';
+import { Injectable, type OnModuleInit } from '@nestjs/common';
 import type { Round } from '@weighhouse/shared/contracts/rounds';
 import type { EntityManager } from 'typeorm';
 import { CaseAccess, type OpenedCase } from '../../cases/case-access.js';
-import { CaseChanges } from '../../cases/case-changes.js';
+import { CaseChanges, type Consequence } from '../../cases/case-changes.js';
 import { TeamReader } from '../../cases/team-reader.js';
 import { Clock } from '../../platform/clock/clock.js';
 import { UnitOfWork, type Work } from '../../platform/database/unit-of-work.js';
@@ -16,7 +16,7 @@ import { RoundRow } from './round.entity.js';
 
 /** Unseals and closes rounds. Either ends the round: afterwards none is open. */
 @Injectable()
-export class EndRoundsService {
+export class EndRoundsService implements OnModuleInit {
   constructor(
     private readonly access: CaseAccess,
     private readonly work: UnitOfWork,
@@ -26,6 +26,10 @@ export class EndRoundsService {
     private readonly team: TeamReader,
     private readonly views: RoundViews,
   ) {}
+
+  onModuleInit(): void {
+    this.changes.follow(this.withdrawn);
+  }
 
   /**
    * Shows everybody on the case the numbers of those who handed in.
@@ -77,10 +81,18 @@ export class EndRoundsService {
    * @returns the columns to write with the change of the case
    */
   async closeForConclusion(work: Work, caseId: string): Promise<{ roundOpen?: false }> {
-    const round = await this.rounds.openOf(caseId, work.em);
+    return this.closeOpen(work.em, caseId);
+  }
+
+  /** A case that is withdrawn has no open round. A sealed one is closed as it is: its numbers are shown to nobody. */
+  private readonly withdrawn: Consequence = async (em, file) =>
+    file.state === 'withdrawn' && file.roundOpen ? this.closeOpen(em, file.id) : {};
+
+  private async closeOpen(em: EntityManager, caseId: string): Promise<{ roundOpen?: false }> {
+    const round = await this.rounds.openOf(caseId, em);
     if (!round) return {};
-    const { personIds } = await this.absentFrom(round, work.em);
-    await this.end(work.em, round, personIds, { state: 'closed', closedAt: this.clock.now() });
+    const { personIds } = await this.absentFrom(round, em);
+    await this.end(em, round, personIds, { state: 'closed', closedAt: this.clock.now() });
     return { roundOpen: false };
   }
 

@@ -5,12 +5,9 @@ import { CaseAccess } from '../../cases/case-access.js';
 import { CaseChanges } from '../../cases/case-changes.js';
 import { Clock } from '../../platform/clock/clock.js';
 import { UnitOfWork } from '../../platform/database/unit-of-work.js';
-import { invalid, notReady } from '../../platform/errors/refusal.js';
+import { invalid } from '../../platform/errors/refusal.js';
 import type { Actor } from '../../platform/http/actor.js';
-import { countingFindings } from '../pool/case-pool.js';
-import { PoolReader } from '../pool/pool-reader.js';
-import { StandingService } from '../pool/standing.service.js';
-import { missingToOpen } from './readiness.js';
+import { RoundBeginning } from './round-beginning.js';
 import { RoundViews } from './round-views.js';
 import { RoundRow } from './round.entity.js';
 
@@ -22,13 +19,12 @@ export class OpenRoundsService {
     private readonly work: UnitOfWork,
     private readonly changes: CaseChanges,
     private readonly clock: Clock,
-    private readonly pools: PoolReader,
-    private readonly standings: StandingService,
+    private readonly beginning: RoundBeginning,
     private readonly views: RoundViews,
   ) {}
 
   /**
-   * Opens the next round. Where the panel stood before is kept, for the ledger's mark.
+   * Opens the next round, and tells those who judge in it. Where the panel stood before is kept, for the ledger's mark.
    * @throws Refusal 409 `not-ready` naming everything that is missing, 409 `round-open` while a round is open
    */
   async open(
@@ -42,13 +38,7 @@ export class OpenRoundsService {
       const deadline = input.deadline ? new Date(input.deadline) : null;
       if (deadline !== null && deadline <= now)
         throw invalid([{ path: 'deadline', message: 'must be later than now' }]);
-      const pool = await this.pools.read(caseId, work.em);
-      const missing = missingToOpen(input.kind, {
-        candidates: pool.candidates.length,
-        findings: countingFindings(pool).length,
-        unsealedRounds: pool.rounds.filter((round) => round.unsealedAt !== null).length,
-      });
-      if (missing.length > 0) throw notReady(missing);
+      const pool = await this.beginning.prepared(work.em, caseId, input.kind);
       const round = work.em.create(RoundRow, {
         id: randomUUID(),
         caseId,
@@ -63,7 +53,7 @@ export class OpenRoundsService {
         unsealReason: null,
         closedAt: null,
       });
-      await this.standings.snapshot(work.em, caseId, round.id);
+      await this.beginning.begin(work.em, file, round, pool);
       await work.em.insert(RoundRow, round);
       const sentence = `opened round ${String(round.number)}, ${round.kind}`;
       await this.changes.commit(

@@ -1,4 +1,4 @@
-import { Inject, Injectable, Logger } from '@nestjs/common';
+import { Inject, Injectable, Logger, type OnModuleDestroy } from '@nestjs/common';
 import { Interval } from '@nestjs/schedule';
 import nodemailer, { type Transporter } from 'nodemailer';
 import { DataSource, type EntityManager, IsNull, LessThanOrEqual } from 'typeorm';
@@ -15,10 +15,11 @@ const longestWaitMs = 3_600_000;
  * No clinical content in a letter: a case number and a link.
  */
 @Injectable()
-export class Outbox {
+export class Outbox implements OnModuleDestroy {
   private readonly logger = new Logger(Outbox.name);
   private readonly transport: Transporter;
   private sending: Promise<void> | null = null;
+  private closing = false;
 
   constructor(
     private readonly source: DataSource,
@@ -26,6 +27,13 @@ export class Outbox {
     @Inject(CONFIGURATION) private readonly configuration: Configuration,
   ) {
     this.transport = nodemailer.createTransport(configuration.SMTP_URL);
+  }
+
+  /** The run under way is finished while there is a database, and none is begun any more. */
+  async onModuleDestroy(): Promise<void> {
+    this.closing = true;
+    await this.sending;
+    this.transport.close();
   }
 
   async put(em: EntityManager, mail: { to: string; subject: string; body: string }): Promise<void> {
@@ -45,18 +53,22 @@ export class Outbox {
   async flush(): Promise<void> {
     // A run under way may have looked before the newest letter was there.
     await this.sending;
+    if (this.closing) return;
     this.sending ??= this.sendDue().finally(() => (this.sending = null));
     await this.sending;
   }
 
   private async sendDue(): Promise<void> {
-    if (!this.source.isInitialized) return;
     const due = await this.source.manager.find(OutboxMail, {
       where: { sentAt: IsNull(), nextAttemptAt: LessThanOrEqual(this.clock.now()) },
       order: { id: 'ASC' },
       take: atOnce,
     });
-    for (const mail of due) await this.send(mail);
+    for (const mail of due) {
+      // What is left is due again after the next start.
+      if (this.closing) return;
+      await this.send(mail);
+    }
   }
 
   private async send(mail: OutboxMail): Promise<void> {
