@@ -93,7 +93,6 @@ describe('the environment of the server', () => {
       DATABASE_URL: 'mysql://mine/w',
       TIME_ZONE: 'Europe/Berlin',
       MAIL_FROM: 'a@b',
-      REDIS_URL: 'redis://r',
     };
     expect(serverEnvironment(readSettings(env), { env, secrets: {}, services: {} })).toMatchObject(env);
   });

@@ -21,7 +21,7 @@ export const domains = [
 ];
 
 /** These look at all domains, and nobody imports them. */
-export const readers = ['live', 'audit', 'notifications', 'today', 'exports'];
+export const readers = ['live', 'audit', 'today', 'exports'];
 
 /** What shared code may rely on, in a browser and on a server alike. */
 const sharedPackages = ['package:zod', 'package:canonicalize'];
