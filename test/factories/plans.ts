@@ -73,3 +73,9 @@ export async function concludedCase(running: RunningApp, wishes: CaseWishes = {}
   await conclude(case_);
   return case_;
 }
+
+/** A plan and its drafts as one person sees them. */
+export async function readPlan(case_: JudgedCase, person: JudgedCase['chair']): Promise<PlanView> {
+  const { body } = await person.agent.get(`/api/cases/${case_.id}/plan`).expect(200);
+  return planViewSchema.parse(body);
+}
