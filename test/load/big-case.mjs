@@ -45,6 +45,7 @@ async function contributors(base, count) {
     const person = items.find((/** @type {{ email: string }} */ one) => one.email.startsWith(`${id}@`));
     if (!person.roles.includes('specialist'))
       await administrator.send('PATCH', `/api/people/${person.id}`, {
+        version: person.version,
         roles: [...person.roles, 'specialist'],
       });
     people.push({ id: person.id, client: await signedIn(base, id) });

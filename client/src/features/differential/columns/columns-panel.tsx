@@ -58,7 +58,7 @@ function ColumnLine({ column, share }: { column: Column; share: number | null })
     <li>
       <span>
         {columnLabel(column)}
-        {share !== null && <span className="small soft"> {naturalFrequency(share).words}</span>}
+        {share !== null && <span className="small soft column-share">{naturalFrequency(share).words}</span>}
       </span>
       {column.none ? (
         <span className="small soft">always there</span>

@@ -24,12 +24,15 @@ interface Props {
   triedColumns: readonly string[];
   /** The chair wants it discussed first. */
   onAgenda: boolean;
+  /** Of the pending findings it is the one that would settle most. */
+  settlesMost: boolean;
   why: ((panel: Panel) => void) | null;
 }
 
 /** One finding across the candidates. Drawn anew only where something of this row changed. */
 export const FindingRow = memo(function FindingRow(props: Props) {
-  const { finding, row, shown, cells, selected, unsaved, tried, triedColumns, onAgenda, why } = props;
+  const { finding, row, shown, cells, selected, unsaved, tried, triedColumns, onAgenda, settlesMost, why } =
+    props;
   const format = useFormat();
   const state = finding.enteredInError ? 'error' : finding.observed === null ? 'pending' : 'observed';
   return (
@@ -49,6 +52,7 @@ export const FindingRow = memo(function FindingRow(props: Props) {
           {tried !== null && <b className="ledger-tried">{tried}</b>}
           {onAgenda && <b className="ledger-agenda">Discuss first.</b>}
           {findingLine(finding, dayWords(format))}
+          {settlesMost && '. Would settle most'}
         </span>
       </th>
       {shown.map((one, index) => {

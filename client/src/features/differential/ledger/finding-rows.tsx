@@ -4,6 +4,7 @@ import { keepingRowCells } from '../model/row-cells';
 import { rowGroups } from '../model/rows';
 import { triedColumns, triedOnRow } from '../trial/trial-changes';
 import { FindingRow } from './finding-row';
+import { settlingMost } from '../next-test/test-words';
 import { useLedger } from './ledger-context';
 
 /** The findings in their groups. */
@@ -13,6 +14,7 @@ export function FindingRows({ shown }: { shown: readonly ShownColumn[] }) {
   const cells = cellsOf(differential, rows, columns.length);
   const placeOf = new Map(rows.map((finding, index) => [finding.id, index + 1]));
   const agenda = new Set(differential.agenda.map((item) => item.findingId));
+  const settling = settlingMost(differential);
   const selected =
     panel?.kind === 'row' || panel?.kind === 'trial'
       ? panel.findingId
@@ -38,6 +40,7 @@ export function FindingRows({ shown }: { shown: readonly ShownColumn[] }) {
           tried={triedOnRow(reading.trial, finding)}
           triedColumns={triedColumns(reading.trial, finding.id)}
           onAgenda={agenda.has(finding.id)}
+          settlesMost={settling === finding.id}
           why={differential.assessment ? open : null}
         />
       ))}

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { burdenWords } from '../model/finding-words';
-import { makeFinding } from '../testing/make-differential';
+import { makeAssessment, makeFinding } from '../testing/make-differential';
 import {
   bitsWords,
   costWords,
@@ -10,6 +10,7 @@ import {
   leaderWords,
   rankWords,
   settlesWords,
+  settlingMost,
 } from './test-words';
 import type { TestView } from './tests-view';
 
@@ -49,6 +50,22 @@ describe('what a test settles, in words', () => {
     expect(rankWords(test(0.05), 3)).toBe('settles most of these, yet little');
     expect(rankWords(test(0.001), 2)).toBe('settles most of these, yet hardly anything');
     expect(rankWords(test(0.2, 2), 3)).toBe('settles something');
+  });
+
+  it('marks one row of the ledger, and none where the first settles little or stands alone', () => {
+    const next = (finding: string, bits: number) => ({
+      finding,
+      bits,
+      leaderChanges: 0,
+      frontier: true,
+      levels: [],
+    });
+    const of = (...nextTests: ReturnType<typeof next>[]) =>
+      settlingMost({ assessment: makeAssessment({ nextTests }) });
+    expect(of(next('pet', 0.41), next('echo', 0.2))).toBe('pet');
+    expect(of(next('pet', 0.41))).toBeNull();
+    expect(of(next('pet', 0.09), next('echo', 0.02))).toBeNull();
+    expect(settlingMost({ assessment: null })).toBeNull();
   });
 
   it('never rounds bits to nothing', () => {

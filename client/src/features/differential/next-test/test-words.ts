@@ -1,3 +1,4 @@
+import type { Differential } from '@weighhouse/shared/contracts/differential';
 import { naturalFrequency } from '@weighhouse/shared/reasoning/natural-frequency';
 import { counted } from '../../../lib/words';
 import type { TestView } from './tests-view';
@@ -23,6 +24,12 @@ export function rankWords({ rank, bits }: Pick<TestView, 'rank' | 'bits'>, of: n
   const alone = settlesWords(bits);
   if (rank > 1 || of < 2) return alone;
   return bits >= settlesFrom.something ? 'settles most' : `settles most of these, yet ${alone.slice(8)}`;
+}
+
+/** The pending finding that would settle most, where there are several and it is more than little. */
+export function settlingMost({ assessment }: Pick<Differential, 'assessment'>): string | null {
+  const [first, second] = assessment?.nextTests ?? [];
+  return first && second && first.bits >= settlesFrom.something ? first.finding : null;
 }
 
 /** "0.17 bits"; below a hundredth not rounded to nothing. */
