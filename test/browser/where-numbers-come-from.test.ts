@@ -129,20 +129,23 @@ describe('where the numbers come from', () => {
     await side(page).getByRole('button', { name: 'Print this page' }).click();
     await page.locator('html[data-printed]').waitFor();
     await page.emulateMedia({ media: 'print' });
+    await page.locator('.pooled-sheet').waitFor();
     const paper = await page.locator('body').innerText();
+    await page.emulateMedia({ media: null });
     expect(paper).toContain(`How it was pooled: ${case_.number}`);
     for (const { name } of case_.contributors) expect(paper).toContain(name);
     expect(paper).not.toContain('Where the panel stands');
-    await page.emulateMedia({ media: null });
     const pdf = await page.pdf({ preferCSSPageSize: true });
     expect(pdf.toString('latin1').match(/\/Type\s*\/Page\b(?!s)/g)).toHaveLength(1);
   });
 
   it('the panel as JSON gives the standing on the screen', async () => {
     const { page } = chair;
-    const waiting = page.waitForEvent('download');
-    await side(page).getByRole('button', { name: 'Panel as JSON' }).click();
-    const file = await (await waiting).path();
+    const [download] = await Promise.all([
+      page.waitForEvent('download'),
+      side(page).getByRole('button', { name: 'Panel as JSON' }).click(),
+    ]);
+    const file = await download.path();
     const { standing } = assess(JSON.parse(await readFile(file, 'utf8')) as Panel, { only: 'standing' });
     const shown = await page.locator('.ledger-standing .standing-big').first().innerText();
     expect(shown).toBe(`${String(Math.round((standing[0] ?? 0) * 100))}%`);
