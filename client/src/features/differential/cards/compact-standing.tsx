@@ -13,7 +13,9 @@ import { standingSentence, standingView } from '../model/standing-view';
 export function CompactStanding() {
   const { differential, columns, reading } = useLedger();
   const [all, setAll] = useState(false);
-  const without = useWithout();
+  const pointed = useWithout();
+  // Only what a button holds: at the lower edge a change under the pointer would move what is pointed at.
+  const without = pointed?.held === true ? pointed : null;
   const standing = differential.assessment?.standing ?? differential.mine?.standing ?? null;
   const shown = all ? columns : leadingColumns(columns, standing, 3);
   const sealed = differential.sealed && !differential.assessment;
@@ -52,7 +54,8 @@ export function CompactStanding() {
 function Line({ column }: { column: Column }) {
   const { differential, open } = useLedger();
   const view = standingView(differential, column.index);
-  const without = useWithout()?.standing?.[column.index] ?? null;
+  const pointed = useWithout();
+  const without = pointed?.held === true ? (pointed.standing?.[column.index] ?? null) : null;
   return (
     <li>
       {view.share === null ? (

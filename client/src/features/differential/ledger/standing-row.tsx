@@ -20,19 +20,21 @@ export function StandingRow({ row, shown }: { row: number; shown: readonly Shown
         <span className="ledger-name">
           {reading.panelsOwn ? 'Where the panel stands' : 'Where the panel would stand'}
         </span>
-        {without ? (
-          <span className="ledger-line" data-without-said>
-            {without.sentence} The dashed line is the standing without it.
-          </span>
-        ) : (
-          standingLines(differential).map((line) => (
+        {/* What is covered keeps its room: a row that changed its height would move what is pointed at. */}
+        <span className="standing-lines" data-covered={without !== null || undefined}>
+          {standingLines(differential).map((line) => (
             <span key={line} className="ledger-line">
               {line}
             </span>
-          ))
+          ))}
+          {range !== null && <span className="ledger-line">{range}</span>}
+          <CombinationsButton />
+        </span>
+        {without && (
+          <span className="standing-without-said">
+            {without.sentence} The dashed line is the standing without it.
+          </span>
         )}
-        {range !== null && !without && <span className="ledger-line">{range}</span>}
-        {!without && <CombinationsButton />}
       </th>
       {shown.map((one, index) => (
         <StandingCell key={one.column.id} of={one} row={row} place={index + 1} />
@@ -66,16 +68,18 @@ function StandingCell({ of, row, place }: { of: ShownColumn; row: number; place:
           <MovingFigure share={view.share} percent />
         </span>
       )}
-      <span className="standing-like">
-        {view.share !== null &&
-          (without === null
-            ? `${naturalFrequency(view.share).words} like this`
-            : `${naturalFrequency(without).words} without`)}
-        {view.share === null && view.own !== null && `you: ${naturalFrequency(view.own).words}`}
+      <span className="standing-words" data-covered={without !== null || undefined}>
+        <span className="standing-like">
+          {view.share !== null && `${naturalFrequency(view.share).words} like this`}
+          {view.share === null && view.own !== null && `you: ${naturalFrequency(view.own).words}`}
+        </span>
+        {panels !== null && (
+          <span className="standing-like">the panel: {naturalFrequency(panels).outOf100}</span>
+        )}
+        {without !== null && (
+          <span className="standing-without">{naturalFrequency(without).words} without</span>
+        )}
       </span>
-      {panels !== null && without === null && (
-        <span className="standing-like">the panel: {naturalFrequency(panels).outOf100}</span>
-      )}
       <span className="aside-text">{standingSentence(view)}</span>
     </td>
   );
