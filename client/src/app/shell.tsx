@@ -15,7 +15,7 @@ import { useSessionOver } from './session-over';
 /** The frame around every page of a signed-in person. */
 export function Shell() {
   const me = useMe();
-  const over = useSessionOver();
+  const over = useSessionOver(me.data != null);
   const { pathname, search } = useLocation();
   const [seen, setSeen] = useState(false);
   if (me.data && !seen) setSeen(true);

@@ -5,12 +5,14 @@ export type LiveState = 'connected' | 'reconnecting';
 
 /** Milliseconds before a server that refused the connection is asked again. */
 const refusedPause = 10_000;
+/** Milliseconds before a connection that nobody answers is given up and tried anew. */
+const connectTimeout = 8_000;
 
 type Handler = (payload: unknown) => void;
 
 /**
- * One socket for the whole page, opened when somebody first watches a case. The code of the client library is loaded
- * then, too. Every (re)connection calls `onConnect`, where the watchers join again and refetch.
+ * One socket for the whole page, opened as soon as somebody is signed in: through it a page hears at once that its
+ * session has ended. The code of the client library is loaded then, too. Every (re)connection calls `onConnect`, where the watchers join again and refetch.
  */
 class LiveConnection {
   #socket: Socket | null = null;
@@ -75,7 +77,7 @@ class LiveConnection {
 
   #connect(): Promise<Socket> {
     this.#opening ??= import('socket.io-client').then(({ io }) => {
-      const socket = io({ path: '/live', transports: ['websocket', 'polling'] });
+      const socket = io({ path: '/live', transports: ['websocket', 'polling'], timeout: connectTimeout });
       socket.on('connect', () => {
         this.#setState('connected');
         for (const handler of this.#connectHandlers) handler();

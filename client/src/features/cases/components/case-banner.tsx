@@ -1,6 +1,7 @@
 import type { Case } from '@weighhouse/shared/contracts/cases';
 import { Link } from 'react-router-dom';
 import { useFormat } from '../../../lib/use-format';
+import './case-banner.css';
 
 const titles: Partial<Record<Case['state'], string>> = {
   returned: 'Returned with a question',

@@ -109,7 +109,7 @@ function About({ finding }: { finding: Finding }) {
       {finding.detail !== '' && <p className="side-detail">{finding.detail}</p>}
       {finding.enteredInError && (
         <p>
-          Entered in error, by {finding.enteredInError.by}, {format.moment(finding.enteredInError.at)}:{' '}
+          {finding.enteredInError.by}, {format.moment(finding.enteredInError.at)}:{' '}
           {finding.enteredInError.words}
         </p>
       )}

@@ -41,6 +41,9 @@ function OpenRoundForm({ onDone }: { onDone: () => void }) {
   const [kind, setKind] = useState<RoundKind | null>(first ? 'sealed' : null);
   const [deadline, setDeadline] = useState('');
   const faults = isApiError(opening.error) ? opening.error.fields : [];
+  // What is missing on the case has no field here; a fault of a field stands beside it, once.
+  const elsewhere = faults.filter((fault) => !['kind', 'deadline'].includes(fault.path));
+  const besideFields = faults.length > 0 && elsewhere.length === 0;
   const submit = (event: SyntheticEvent) => {
     event.preventDefault();
     if (!kind) return;
@@ -88,10 +91,10 @@ function OpenRoundForm({ onDone }: { onDone: () => void }) {
           />
         )}
       </FormField>
-      <FailureLine error={opening.error} />
-      {faults.length > 0 && (
+      {!besideFields && <FailureLine error={opening.error} />}
+      {elsewhere.length > 0 && (
         <ul className="plain-list">
-          {faults.map((fault) => (
+          {elsewhere.map((fault) => (
             <li key={fault.path + fault.message}>{fault.message}</li>
           ))}
         </ul>
