@@ -1,3 +1,4 @@
+import type { Case } from '@weighhouse/shared/contracts/cases';
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import {
   acceptedCase,
@@ -143,6 +144,11 @@ describe('concluding', () => {
     ];
     expect(refused.map(({ status }) => status)).toEqual([409, 409, 409, 409]);
     await case_.chair.agent.post(`${path}/reopen`).send({ words: 'The biopsy is back.' }).expect(200);
+    const reopened = (await case_.contributors[0]!.agent.get(path).expect(200)).body as Case;
+    expect(reopened).toMatchObject({
+      state: 'judging',
+      words: { move: 'reopened', text: 'The biopsy is back.' },
+    });
     const stolen = await case_.chair.agent
       .put(`${path}/plan`)
       .send(

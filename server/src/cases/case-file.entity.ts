@@ -1,4 +1,4 @@
-import type { CaseState, Sex, Urgency } from '@weighhouse/shared/contracts/cases';
+import type { CaseState, Sex, Urgency, WordedMove } from '@weighhouse/shared/contracts/cases';
 import type { RoundKind } from '@weighhouse/shared/contracts/rounds';
 import { Column, Entity, Index, PrimaryColumn } from 'typeorm';
 import { moment } from '../platform/database/columns.js';
@@ -95,7 +95,7 @@ export class CaseFile {
 
   /** The words of the last return, decline, withdrawal or reopening. */
   @Column('varchar', { length: 20, nullable: true })
-  lastMove: string | null;
+  lastMove: WordedMove | null;
 
   @Column('text', { nullable: true })
   lastWords: string | null;

@@ -1,10 +1,9 @@
+import type { WordedMove } from '@weighhouse/shared/contracts/cases';
 import type { CaseFile } from './case-file.entity.js';
-
-export type MoveWithWords = 'submitted' | 'returned' | 'accepted' | 'declined' | 'withdrawn' | 'reopened';
 
 /** The columns that keep the words of a move; without words those of the move before stay. */
 export function wordsColumns(
-  move: MoveWithWords,
+  move: WordedMove,
   words: string | undefined,
   byId: string,
   at: Date,

@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import type { CaseAction } from '@weighhouse/shared/access/actions';
-import type { Case, CaseState } from '@weighhouse/shared/contracts/cases';
+import type { Case, CaseState, WordedMove } from '@weighhouse/shared/contracts/cases';
 import { Clock } from '../platform/clock/clock.js';
 import { UnitOfWork } from '../platform/database/unit-of-work.js';
 import type { Actor } from '../platform/http/actor.js';
@@ -8,12 +8,12 @@ import { CaseAccess } from './case-access.js';
 import { CaseChanges } from './case-changes.js';
 import { CaseLetters } from './case-letters.js';
 import { CaseViews } from './case-views.js';
-import { type MoveWithWords, wordsColumns } from './case-words.js';
+import { wordsColumns } from './case-words.js';
 
 interface Move {
   action: CaseAction;
   to: CaseState;
-  words: MoveWithWords;
+  words: WordedMove;
   trail: string;
   sentence: string;
 }

@@ -11,6 +11,17 @@ import {
 } from './common.js';
 import { roundProgressSchema } from './rounds.js';
 
+/** What happened to the case when the words it shows were said. */
+export const wordedMoveSchema = z.enum([
+  'submitted',
+  'returned',
+  'accepted',
+  'declined',
+  'withdrawn',
+  'reopened',
+]);
+export type WordedMove = z.infer<typeof wordedMoveSchema>;
+
 export const caseStates = [
   'draft',
   'submitted',
@@ -126,7 +137,9 @@ export const caseSchema = z
     /** `pending`: the findings that are not known yet, among the findings. */
     counts: z.object({ reports: z.int(), findings: z.int(), pending: z.int(), candidates: z.int() }),
     /** The last words with which the case was returned, declined, withdrawn or reopened. */
-    words: z.object({ move: z.string(), text: z.string(), by: z.string(), at: momentSchema }).nullable(),
+    words: z
+      .object({ move: wordedMoveSchema, text: z.string(), by: z.string(), at: momentSchema })
+      .nullable(),
     /** What is still missing before the draft can be submitted. */
     missing: z.array(z.object({ path: z.string(), message: z.string() })),
     submittedAt: momentSchema.nullable(),

@@ -16,7 +16,7 @@ const titles: Partial<Record<Case['state'], string>> = {
 export function CaseBanner({ of, quiet = false }: { of: Case; quiet?: boolean }) {
   const format = useFormat();
   const { words } = of;
-  const reopened = of.state === 'judging' && words?.move === 'reopen';
+  const reopened = of.state === 'judging' && words?.move === 'reopened';
   const title = reopened ? 'Reopened' : titles[of.state];
   if (title === undefined && of.state !== 'draft') return null;
   return (
