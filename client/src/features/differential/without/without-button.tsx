@@ -20,7 +20,7 @@ export function WithoutButton({ left, name }: { left: LeftOut; name: string }) {
           else store.hold(left);
         }}
       >
-        {held ? 'With it again' : 'Without'}
+        Standing without
       </button>
       {held && <span className="without-said">{without.sentence}</span>}
     </span>
