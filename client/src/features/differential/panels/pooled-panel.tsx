@@ -11,6 +11,7 @@ import { TwoPoolsTable } from '../pooled/two-pools-table';
 import { useInFull } from '../why-sum/use-in-full';
 import { usePanelInForce } from '../why-sum/use-panel-in-force';
 import { SideHeading } from './side-panel';
+import { WithoutButton } from '../without/without-button';
 import { useWeights } from './use-weights';
 
 /** How the standing came about: method, weights, what was counted less, who was not in. */
@@ -108,6 +109,9 @@ function Weights() {
                 <th scope="row">
                   {voice.name}
                   {reason != null && reason !== '' && <span className="small soft why-more">{reason}</span>}
+                  <span className="small why-more">
+                    <WithoutButton left={{ kind: 'contributor', id: voice.key }} name={voice.name} />
+                  </span>
                 </th>
                 <td>{person?.prior ? (person.priorInForce ? 'given' : 'of an earlier set') : 'none'}</td>
                 <td className="figures why-number">{judged}</td>
