@@ -2,6 +2,7 @@ import { useId, useState } from 'react';
 import { useWidth } from '../ledger/use-width';
 import { ScatterDrawing } from './scatter-drawing';
 import type { TestView } from './tests-view';
+import './scatter.css';
 
 export type Takes = 'waitDays' | 'cost';
 
