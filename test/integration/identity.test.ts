@@ -3,6 +3,7 @@ import { identitySchema } from '@weighhouse/shared/contracts/summaries';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { acceptedCase, type JudgedCase, seat, type SeatedPerson } from '../factories/judgements.js';
 import { type RunningApp, startApp } from '../setup/app.js';
+import { errorOf } from '../setup/refusals.js';
 
 let running: RunningApp;
 let case_: JudgedCase;
@@ -22,8 +23,6 @@ beforeAll(async () => {
 afterAll(() => running.close());
 
 const path = (of: JudgedCase = case_): string => `/api/cases/${of.id}/identity`;
-const errorOf = (body: unknown) =>
-  (body as { error: { id: string; fields?: { path: string }[]; current?: unknown } }).error;
 const read = async (person: SeatedPerson, of?: JudgedCase) => {
   const { body } = await person.agent.get(path(of)).expect(200);
   return identitySchema.parse(body);

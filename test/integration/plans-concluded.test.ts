@@ -19,7 +19,8 @@ import {
   wholePlan,
 } from '../factories/plans.js';
 import { type RunningApp, startApp } from '../setup/app.js';
-import { mailbox } from '../setup/mailbox.js';
+import { lettersSent, mailbox } from '../setup/mailbox.js';
+import { errorOf, pathsOf } from '../setup/refusals.js';
 
 let running: RunningApp;
 const box = mailbox();
@@ -36,15 +37,8 @@ afterEach(() => {
 });
 
 type Person = JudgedCase['chair'];
-const errorOf = (body: unknown) =>
-  (body as { error: { id: string; fields?: { path: string }[]; current?: unknown } }).error;
-const pathsOf = (body: unknown): string[] => errorOf(body).fields?.map(({ path }) => path) ?? [];
 
-async function letters(): Promise<{ to: string[]; subject: string; text: string }[]> {
-  await running.outbox.flush();
-  await running.outbox.flush();
-  return box.messages();
-}
+const letters = () => lettersSent(running, box);
 
 describe('concluding', () => {
   it('asks for the password again, signs, closes the live round and keeps where the panel stood', async () => {

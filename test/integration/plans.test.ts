@@ -4,7 +4,8 @@ import { acceptedCase, type JudgedCase, seat, unsealedCase } from '../factories/
 import { testPassword } from '../factories/people.js';
 import { askedCase, planWords, readPlan, savePlan, wholePlan } from '../factories/plans.js';
 import { type RunningApp, startApp } from '../setup/app.js';
-import { mailbox } from '../setup/mailbox.js';
+import { lettersSent, mailbox } from '../setup/mailbox.js';
+import { errorOf, pathsOf } from '../setup/refusals.js';
 
 let running: RunningApp;
 const box = mailbox();
@@ -21,15 +22,8 @@ afterEach(() => {
 });
 
 type Person = JudgedCase['chair'];
-const errorOf = (body: unknown) =>
-  (body as { error: { id: string; fields?: { path: string }[]; current?: unknown } }).error;
-const pathsOf = (body: unknown): string[] => errorOf(body).fields?.map(({ path }) => path) ?? [];
 
-async function letters(): Promise<{ to: string[]; subject: string; text: string }[]> {
-  await running.outbox.flush();
-  await running.outbox.flush();
-  return box.messages();
-}
+const letters = () => lettersSent(running, box);
 
 describe('the draft of a plan', () => {
   it('is written by the chair in parts, and names what concluding still needs', async () => {

@@ -1,10 +1,18 @@
-import { type Summary, summarySchema, tellListSchema } from '@weighhouse/shared/contracts/summaries';
+import { tellListSchema } from '@weighhouse/shared/contracts/summaries';
 import { openApiDocument } from '@weighhouse/server/platform/http/open-api';
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
-import { type JudgedCase, seat, type SeatedPerson } from '../factories/judgements.js';
+import { seat } from '../factories/judgements.js';
 import { concludedCase } from '../factories/plans.js';
+import {
+  approveSummary,
+  contactInput,
+  readSummary,
+  saveSummary,
+  summaryPath,
+} from '../factories/summaries.js';
 import { type RunningApp, startApp } from '../setup/app.js';
 import { mailbox } from '../setup/mailbox.js';
+import { errorOf } from '../setup/refusals.js';
 
 let running: RunningApp;
 const box = mailbox();
@@ -20,45 +28,11 @@ afterEach(() => {
   running.clock.reset();
 });
 
-const path = (of: JudgedCase): string => `/api/cases/${of.id}/summary`;
-const errorOf = (body: unknown) =>
-  (body as { error: { id: string; fields?: { path: string }[]; current?: unknown } }).error;
-
-async function read(case_: JudgedCase, person: SeatedPerson): Promise<Summary> {
-  const { body } = await person.agent.get(path(case_)).expect(200);
-  return summarySchema.parse(body);
-}
-
-async function save(
-  case_: JudgedCase,
-  input: { version: number; body: string; ready?: boolean },
-): Promise<Summary> {
-  const { body } = await case_.liaison.agent.put(path(case_)).send(input).expect(200);
-  return summarySchema.parse(body);
-}
-
-async function approve(case_: JudgedCase, version: number): Promise<Summary> {
-  const { body } = await case_.chair.agent
-    .post(`${path(case_)}/approve`)
-    .send({ version })
-    .expect(200);
-  return summarySchema.parse(body);
-}
-
-const contact = (change: object = {}) => ({
-  at: running.clock.now().toISOString(),
-  how: 'telephone',
-  reached: true,
-  understood: 'partly',
-  questions: 'Can I travel?',
-  notes: 'Her daughter listened too.',
-  ...change,
-});
-
 describe('the contact log', () => {
   it('keeps attempts, and refuses what cannot have happened', async () => {
     const case_ = await concludedCase(running);
-    const log = (change: object) => case_.liaison.agent.post(`${path(case_)}/contacts`).send(contact(change));
+    const log = (change: object) =>
+      case_.liaison.agent.post(`${summaryPath(case_)}/contacts`).send(contactInput(running, change));
     await log({ reached: false, understood: null, questions: '', notes: 'Nobody answered.' }).expect(200);
     const future = new Date(running.clock.now().getTime() + 3_600_000).toISOString();
     for (const [change, at] of [
@@ -70,14 +44,14 @@ describe('the contact log', () => {
       const { body } = await log(change).expect(400);
       expect(errorOf(body).fields?.map((fault) => fault.path)).toEqual([at]);
     }
-    const { version } = await save(case_, { version: 0, body: 'Text', ready: true });
-    await approve(case_, version);
+    const { version } = await saveSummary(case_, { version: 0, body: 'Text', ready: true });
+    await approveSummary(case_, version);
     const unreached = await case_.liaison.agent
-      .post(`${path(case_)}/told`)
-      .send(contact({ reached: false }))
+      .post(`${summaryPath(case_)}/told`)
+      .send(contactInput(running, { reached: false }))
       .expect(400);
     expect(errorOf(unreached.body).fields?.map((fault) => fault.path)).toEqual(['reached']);
-    const { contacts, state } = await read(case_, case_.liaison);
+    const { contacts, state } = await readSummary(case_, case_.liaison);
     expect([state, contacts.map(({ told, notes }) => [told, notes])]).toEqual([
       'approved',
       [[false, 'Nobody answered.']],
@@ -96,11 +70,11 @@ describe('the liaison', () => {
     expect(await tell()).toMatchObject([
       { caseId: case_.id, number: case_.number, state: 'draft', hasPlan: true, attempts: 0 },
     ]);
-    const { version } = await save(case_, { version: 0, body: 'Text', ready: true });
-    await approve(case_, version);
+    const { version } = await saveSummary(case_, { version: 0, body: 'Text', ready: true });
+    await approveSummary(case_, version);
     await case_.liaison.agent
-      .post(`${path(case_)}/contacts`)
-      .send(contact({ reached: false }))
+      .post(`${summaryPath(case_)}/contacts`)
+      .send(contactInput(running, { reached: false }))
       .expect(200);
     expect(await tell()).toMatchObject([{ state: 'approved', attempts: 1 }]);
     const other = await seat(running, 'liaison');
@@ -134,22 +108,22 @@ describe('the liaison', () => {
 describe('a reopened case', () => {
   it('gets a summary of its own for the later plan; the first stays with its contacts', async () => {
     const case_ = await concludedCase(running);
-    const { version } = await save(case_, { version: 0, body: 'Of plan 1', ready: true });
-    await approve(case_, version);
+    const { version } = await saveSummary(case_, { version: 0, body: 'Of plan 1', ready: true });
+    await approveSummary(case_, version);
     await case_.liaison.agent
-      .post(`${path(case_)}/told`)
-      .send(contact())
+      .post(`${summaryPath(case_)}/told`)
+      .send(contactInput(running))
       .expect(200);
     const at = `/api/cases/${case_.id}`;
     await case_.chair.agent.post(`${at}/reopen`).send({ words: 'New result.' }).expect(200);
-    expect(await read(case_, case_.liaison)).toMatchObject({
+    expect(await readSummary(case_, case_.liaison)).toMatchObject({
       body: 'Of plan 1',
       state: 'told',
       abilities: ['summary.read'],
     });
     await case_.liaison.agent
-      .post(`${path(case_)}/contacts`)
-      .send(contact())
+      .post(`${summaryPath(case_)}/contacts`)
+      .send(contactInput(running))
       .expect(409);
   });
 });
