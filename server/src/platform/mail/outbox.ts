@@ -58,16 +58,20 @@ export class Outbox implements OnModuleDestroy {
     await this.sending;
   }
 
+  /** All that is due, some at a time. What was not taken is due later, so this ends. */
   private async sendDue(): Promise<void> {
-    const due = await this.source.manager.find(OutboxMail, {
-      where: { sentAt: IsNull(), nextAttemptAt: LessThanOrEqual(this.clock.now()) },
-      order: { id: 'ASC' },
-      take: atOnce,
-    });
-    for (const mail of due) {
-      // What is left is due again after the next start.
-      if (this.closing) return;
-      await this.send(mail);
+    for (;;) {
+      const due = await this.source.manager.find(OutboxMail, {
+        where: { sentAt: IsNull(), nextAttemptAt: LessThanOrEqual(this.clock.now()) },
+        order: { id: 'ASC' },
+        take: atOnce,
+      });
+      for (const mail of due) {
+        // What is left is due again after the next start.
+        if (this.closing) return;
+        await this.send(mail);
+      }
+      if (due.length < atOnce) return;
     }
   }
 
