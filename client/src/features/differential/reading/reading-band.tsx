@@ -30,7 +30,7 @@ export function ReadingBand() {
         <p>
           {trial && <b>A trial. Only you see it. </b>}
           {sealed && 'It reads your own numbers alone; the others’ are sealed. '}
-          {sentences.join(' ')} <ReadingState />
+          {reading.state === 'shown' ? sentences.join(' ') : <ReadingState />}
         </p>
         {trial && <Tried />}
       </div>
