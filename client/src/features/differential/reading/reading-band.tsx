@@ -75,7 +75,6 @@ function Tried() {
 /** While it is not on the screen yet, or cannot be. */
 function ReadingState() {
   const { reading } = useLedger();
-  if (reading.state === 'shown') return null;
   if (reading.state === 'refused')
     return <b role="alert">It cannot be computed so: the numbers below are the panel’s own.</b>;
   return (
