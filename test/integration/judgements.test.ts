@@ -152,11 +152,11 @@ describe('a row', () => {
 
   it('asks for the exposure, unless nothing is given', async () => {
     const none = await ann.agent.put(rowRoute(1)).send({ candidateSet: set, outOf100: [65, null, 10] });
-    expect([none.status, ...(paths(none) ?? [])]).toEqual([400, 'exposure']);
+    expect([none.status, ...paths(none)]).toEqual([400, 'exposure']);
     const odd = await ann.agent
       .put(rowRoute(1))
       .send({ candidateSet: set, exposure: 'daily', outOf100: [65, null, 10] });
-    expect([odd.status, ...(paths(odd) ?? [])]).toEqual([400, 'exposure']);
+    expect([odd.status, ...paths(odd)]).toEqual([400, 'exposure']);
   });
 
   it.each([
