@@ -1,4 +1,3 @@
-import { Button } from '@radix-ui/themes';
 import type { Finding } from '@weighhouse/shared/contracts/findings';
 import { Link } from 'react-router-dom';
 import { capital } from '../../../lib/words';
@@ -6,6 +5,7 @@ import type { Column } from '../model/columns';
 import { burdenWords } from '../model/finding-words';
 import { Results } from './results';
 import { bitsWords, costWords, daysWords, idleWords, leaderWords, rankWords } from './test-words';
+import { ChangeTestButton } from './change-test-button';
 import { type TestView, unsaid } from './tests-view';
 
 interface Props {
@@ -46,18 +46,7 @@ export function TestItem({ test, of, columns, now, caseId, onChange }: Props) {
         </p>
       </details>
       <p className="test-actions no-print">
-        {onChange && (
-          <Button
-            variant="outline"
-            size="1"
-            aria-label={`Change cost, wait or burden of ${finding.title}`}
-            onClick={() => {
-              onChange(finding);
-            }}
-          >
-            Change cost, wait or burden
-          </Button>
-        )}
+        <ChangeTestButton finding={finding} onChange={onChange} />
         <Link to={`/cases/${caseId}/differential?finding=${finding.id}`}>Its row in the ledger</Link>
       </p>
     </li>

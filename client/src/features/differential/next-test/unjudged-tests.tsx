@@ -1,10 +1,10 @@
-import { Button } from '@radix-ui/themes';
 import type { Differential } from '@weighhouse/shared/contracts/differential';
 import type { Finding } from '@weighhouse/shared/contracts/findings';
 import { Link } from 'react-router-dom';
 import { counted, listed } from '../../../lib/words';
 import { mayJudge } from '../ledger/ledger-context';
 import { effortWords } from '../model/finding-words';
+import { ChangeTestButton } from './change-test-button';
 import { unsaid } from './tests-view';
 
 interface Props {
@@ -44,18 +44,7 @@ export function UnjudgedTests({ differential, findings, onChange }: Props) {
                 </span>
               </span>
               <span className="test-actions no-print">
-                {onChange && (
-                  <Button
-                    variant="outline"
-                    size="1"
-                    aria-label={`Change cost, wait or burden of ${finding.title}`}
-                    onClick={() => {
-                      onChange(finding);
-                    }}
-                  >
-                    Change cost, wait or burden
-                  </Button>
-                )}
+                <ChangeTestButton finding={finding} onChange={onChange} />
                 <Link to={`/cases/${caseId}/differential?finding=${finding.id}`}>
                   {judge ? 'Judge it' : 'Its row in the ledger'}
                 </Link>
